@@ -37,7 +37,10 @@ export type Inputs<S extends InputSpecs> = {
 
 export interface EquationSpec<S extends InputSpecs> {
   readonly id: string;
+  /** What it works out, in a few words, for lists in commands. */
+  readonly title: string;
   readonly version: number;
+  /** One relation, or an `aligned` block: the relation first, then the definitions it uses. */
   readonly tex: string;
   readonly value: { readonly symbol: string; readonly unit: string; readonly decimals?: number };
   readonly inputs: S;
@@ -57,10 +60,11 @@ export interface Equation<S extends InputSpecs = InputSpecs> extends EquationSpe
 
 /** Makes an equation object: TeX, units, ranges, source and code in one place. */
 export function equation<const S extends InputSpecs>(spec: EquationSpec<S>): Equation<S> {
+  const specs: readonly (readonly [string, InputSpec])[] = Object.entries(spec.inputs);
   return {
     ...spec,
     of: (inputs) => {
-      checkInputs(spec, inputs as Readonly<Record<string, unknown>>);
+      checkInputs(specs, inputs as Readonly<Record<string, unknown>>);
       const refused = spec.refuse?.(inputs);
       if (refused) throw refused;
       const value = spec.work(inputs);
@@ -70,8 +74,11 @@ export function equation<const S extends InputSpecs>(spec: EquationSpec<S>): Equ
   };
 }
 
-function checkInputs(spec: EquationSpec<InputSpecs>, inputs: Readonly<Record<string, unknown>>): void {
-  for (const [name, input] of Object.entries(spec.inputs)) {
+function checkInputs(
+  specs: readonly (readonly [string, InputSpec])[],
+  inputs: Readonly<Record<string, unknown>>,
+): void {
+  for (const [name, input] of specs) {
     const given = inputs[name];
     if (input.kind === "many") checkList(name, input, given, inputs);
     else checkNumber(name, input, given);
@@ -94,12 +101,15 @@ function checkNumber(name: string, input: InputSpec, given: unknown): void {
   if (typeof given !== "number" || !Number.isFinite(given) || tooLow(given) || given > input.max) {
     throw new InputError(name, given, rangeText(input));
   }
-  if (input.oneOf && !input.oneOf.includes(given)) throw new InputError(name, given, `one of ${input.oneOf.join(", ")} ${input.unit}`);
+  if (input.oneOf && !input.oneOf.includes(given))
+    throw new InputError(name, given, `one of ${input.oneOf.join(", ")} ${input.unit}`);
 }
 
 /** The accepted range in words, e.g. `a number from 0 to 140 dB`. */
 export function rangeText(input: InputSpec): string {
   const unit = input.unit === "1" ? "" : ` ${input.unit}`;
   if (input.oneOf) return `one of ${input.oneOf.join(", ")}${unit}`;
-  return input.aboveMin ? `a number above ${input.min} and up to ${input.max}${unit}` : `a number from ${input.min} to ${input.max}${unit}`;
+  return input.aboveMin
+    ? `a number above ${input.min} and up to ${input.max}${unit}`
+    : `a number from ${input.min} to ${input.max}${unit}`;
 }
