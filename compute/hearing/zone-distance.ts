@@ -1,0 +1,96 @@
+import { sumLevels } from "../equations/levels/sum-levels.ts";
+import type { Working } from "../equations/working.ts";
+import { silently } from "../equations/working.ts";
+import type { Place } from "../geometry/place.ts";
+import type { ZoneMachine } from "./zone-machine.ts";
+import { distanceToMachineM, machineLevelDba } from "./zone-machine.ts";
+
+/** The place farthest from a machine at which the sum meets the edge level while this machine gives the largest part. */
+export interface ZoneReach {
+  /** Distance from outline and swing [m], unrounded; pages round it up. */
+  readonly distanceM: number;
+  readonly at: Place;
+}
+
+/** Directions looked at round a machine, and steps along each; the crossing is then halved down to a millimetre. */
+const DIRECTIONS = 120;
+const STEPS = 150;
+
+/** Level of all machines together at a place [dB(A)], by the zone rule. */
+export function zoneSumDba(working: Working, machines: readonly ZoneMachine[], place: Place): number {
+  return working.work(
+    sumLevels,
+    { levelsDb: machines.map((machine) => machineLevelDba(working, machine, place)) },
+    "zone-sum",
+  );
+}
+
+/**
+ * How far to mark the zone round a machine. Every place of the contour of the sum lies within this distance of the
+ * machine that is loudest there, so that marking each machine covers the whole contour.
+ *
+ * @param machine   the machine
+ * @param together  all machines that may run at the same time, this one among them
+ * @param edgeDba   edge level [dB(A)]
+ * @returns         the farthest such place, at least 1 m out; nothing if another machine leads wherever the edge level is met
+ */
+export function zoneReach(
+  machine: ZoneMachine,
+  together: readonly ZoneMachine[],
+  edgeDba: number,
+): ZoneReach | undefined {
+  const leads = (place: Place) => isLedBy(machine, together, place, edgeDba);
+  const outermostM = reachBoundM(machine, together.length, edgeDba) + machine.largestDimensionM + machine.swingM;
+  const reaches = directions().flatMap((direction) => farthestAlong(machine, direction, outermostM, leads) ?? []);
+  return reaches.reduce<ZoneReach | undefined>(
+    (kept, next) => (kept && kept.distanceM >= next.distanceM ? kept : next),
+    undefined,
+  );
+}
+
+/** Beyond this distance a place that the machine leads cannot meet the edge level: all others are taken to be as loud. */
+function reachBoundM(machine: ZoneMachine, count: number, edgeDba: number): number {
+  const highestDba = machine.powerDba + 10 * Math.log10(count) + 3 * machine.wallsM.length;
+  return Math.max(1, Math.sqrt(10 ** (0.1 * (highestDba - edgeDba)) / (2 * Math.PI)));
+}
+
+function isLedBy(machine: ZoneMachine, together: readonly ZoneMachine[], place: Place, edgeDba: number): boolean {
+  const ownDba = machineLevelDba(silently, machine, place);
+  if (ownDba + 10 * Math.log10(together.length) < edgeDba) return false;
+  if (together.some((other) => other !== machine && machineLevelDba(silently, other, place) > ownDba)) return false;
+  return zoneSumDba(silently, together, place) >= edgeDba;
+}
+
+function directions(): readonly { readonly x: number; readonly y: number }[] {
+  return Array.from({ length: DIRECTIONS }, (_, index) => {
+    const angle = (2 * Math.PI * index) / DIRECTIONS;
+    return { x: Math.sin(angle), y: Math.cos(angle) };
+  });
+}
+
+function farthestAlong(
+  machine: ZoneMachine,
+  direction: { readonly x: number; readonly y: number },
+  outermostM: number,
+  leads: (place: Place) => boolean,
+): ZoneReach | undefined {
+  const placeAt = (m: number): Place => ({ xM: machine.at.xM + m * direction.x, yM: machine.at.yM + m * direction.y });
+  const stepM = outermostM / STEPS;
+  for (let step = STEPS; step >= 0; step--) {
+    if (!leads(placeAt(step * stepM))) continue;
+    const m = halved(step * stepM, (step + 1) * stepM, (out) => leads(placeAt(out)));
+    return { at: placeAt(m), distanceM: Math.max(1, distanceToMachineM(machine, placeAt(m))) };
+  }
+  return undefined;
+}
+
+/** The end of the stretch from `inM`, where `holds` is true, to `outM`, where it is not, within a millimetre; the outer side of it. */
+function halved(inM: number, outM: number, holds: (m: number) => boolean): number {
+  let [low, high] = [inM, outM];
+  while (high - low > 0.001) {
+    const middle = (low + high) / 2;
+    if (holds(middle)) low = middle;
+    else high = middle;
+  }
+  return high;
+}

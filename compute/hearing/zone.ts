@@ -1,0 +1,85 @@
+import { distanceToLevel } from "../equations/hearing/distance-to-level.ts";
+import type { Working } from "../equations/working.ts";
+import type { Place } from "../geometry/place.ts";
+import { highestBesideDba } from "./beside.ts";
+import { zoneReach, zoneSumDba } from "./zone-distance.ts";
+import type { ZoneMachine } from "./zone-machine.ts";
+
+/** Where ear protection is mandatory round one machine. */
+export type Zone =
+  /** Mark this distance round outline and swing. */
+  | {
+      readonly kind: "distance";
+      readonly machine: string;
+      readonly distanceM: number;
+      readonly at: Place;
+      readonly nearField: boolean;
+      /** Which criterion asks for the larger distance. */
+      readonly by: "level" | "peak";
+    }
+  /** The edge level is met at this machine only because of a louder one, inside whose zone it stands. */
+  | { readonly kind: "inside-another"; readonly machine: string }
+  /** No radius between walls or under a slab: the whole space. */
+  | { readonly kind: "whole-space"; readonly machine: string }
+  /** Impulses without peak data: the whole work area of the activity, until measured. */
+  | { readonly kind: "peak-not-known"; readonly machine: string }
+  | { readonly kind: "none"; readonly machine: string };
+
+export interface ZoneEdges {
+  /** Edge level [dB(A)]. */
+  readonly levelDba: number;
+  /** Edge of the peak criterion [dB(C)], where the duty set has one. */
+  readonly peakDbc: number | undefined;
+}
+
+/**
+ * The zone round one machine, by the one rule for figures, drawings and notices.
+ *
+ * @param working   what works the equations out
+ * @param machine   the machine
+ * @param together  all machines that may run at the same time, this one among them
+ * @param edges     where the zone ends
+ */
+export function zoneOf(
+  working: Working,
+  machine: ZoneMachine,
+  together: readonly ZoneMachine[],
+  edges: ZoneEdges,
+): Zone {
+  if (machine.impulsive && !machine.peak) return { kind: "peak-not-known", machine: machine.id };
+  const peakM = peakDistanceM(working, machine, edges.peakDbc);
+  const loudBeside = highestBesideDba(working, machine, together) >= edges.levelDba;
+  const loud = loudBeside || (machine.workStationDba ?? 0) >= edges.levelDba;
+  if (!loud && peakM === undefined) return { kind: "none", machine: machine.id };
+  if (!machine.open) return { kind: "whole-space", machine: machine.id };
+  const reach = loud ? zoneReach(machine, together, edges.levelDba) : undefined;
+  if (reach && reach.distanceM >= (peakM ?? 0)) {
+    zoneSumDba(working.at("edge"), together, reach.at);
+    return distanceZone(machine, reach.distanceM, reach.at, "level");
+  }
+  if (peakM !== undefined) return distanceZone(machine, peakM, machine.at, "peak");
+  // Only the work station is loud: the least distance that the rule knows.
+  return loudBeside ? { kind: "inside-another", machine: machine.id } : distanceZone(machine, 1, machine.at, "level");
+}
+
+function distanceZone(machine: ZoneMachine, distanceM: number, at: Place, by: "level" | "peak"): Zone {
+  return {
+    kind: "distance",
+    machine: machine.id,
+    distanceM,
+    at,
+    by,
+    nearField: distanceM < 2 * machine.largestDimensionM,
+  };
+}
+
+/** Distance within which peak data reach the peak criterion [m], at least 1; nothing without data, criterion or reach. */
+function peakDistanceM(working: Working, machine: ZoneMachine, edgeDbc: number | undefined): number | undefined {
+  if (!machine.peak || edgeDbc === undefined) return undefined;
+  const distanceM = working.work(
+    distanceToLevel,
+    { levelDb: machine.peak.levelDbc, atDistanceM: machine.peak.distanceM, targetDb: edgeDbc },
+    "peak-distance",
+  );
+  return distanceM < 1 ? undefined : distanceM;
+}
