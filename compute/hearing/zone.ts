@@ -22,7 +22,12 @@ export type Zone =
   /** No radius between walls or under a slab: the whole space. */
   | { readonly kind: "whole-space"; readonly machine: string }
   /** Impulses without peak data: the whole work area of the activity, until measured. */
-  | { readonly kind: "peak-not-known"; readonly machine: string }
+  | {
+      readonly kind: "peak-not-known";
+      readonly machine: string;
+      /** How far the zone reaches by level alone [m]: for checking what it passes, never printed. */
+      readonly leastM: number | undefined;
+    }
   | { readonly kind: "none"; readonly machine: string };
 
 export interface ZoneEdges {
@@ -46,7 +51,10 @@ export function zoneOf(
   together: readonly ZoneMachine[],
   edges: ZoneEdges,
 ): Zone {
-  if (machine.impulsive && !machine.peak) return { kind: "peak-not-known", machine: machine.id };
+  if (machine.impulsive && !machine.peak) {
+    const leastM = machine.open ? zoneReach(machine, together, edges.levelDba)?.distanceM : undefined;
+    return { kind: "peak-not-known", machine: machine.id, leastM };
+  }
   const peakM = peakDistanceM(working, machine, edges.peakDbc);
   const loudBeside = highestBesideDba(working, machine, together) >= edges.levelDba;
   const loud = loudBeside || (machine.workStationDba ?? 0) >= edges.levelDba;
