@@ -276,11 +276,11 @@ export interface Contact {
  */
 export interface Confirmed {
   /**
-   * Document the value stands in: kind and id.
+   * Document the value stands in: plant, panel, lining, silencer, limit-set or duty-set, and its id.
    */
   document: string;
   /**
-   * Place of the value in that document, as a JSON pointer.
+   * Place of the value's source in that document, as a JSON pointer.
    */
   pointer: string;
   by: Who;
@@ -304,11 +304,11 @@ export interface Confirmed {
  */
 export interface Acknowledged {
   /**
-   * Document the value stands in: kind and id.
+   * Document the value stands in: plant, panel, lining, silencer, limit-set or duty-set, and its id.
    */
   document: string;
   /**
-   * Place of the value in that document, as a JSON pointer.
+   * Place of the value's source in that document, as a JSON pointer.
    */
   pointer: string;
   by: Who;

@@ -2,6 +2,10 @@
 import type { LanguageCode } from "./common.gen.ts";
 
 /**
+ * Name of a section or of words in it: letters, digits, dots, hyphens and underscores, starting with a letter.
+ */
+export type WordingKey = string;
+/**
  * Every word the templates print in one language.
  */
 export interface Wording {
