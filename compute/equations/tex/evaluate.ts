@@ -62,6 +62,8 @@ const functions: Readonly<Record<FunctionName, (...args: number[]) => number>> =
 function symbolValue(name: string, scope: Scope): number {
   const number = scope.numbers.get(name);
   if (number !== undefined) return number;
+  const place = scope.indexes.get(name);
+  if (place !== undefined) return place;
   const definition = scope.definitions.get(name);
   if (definition?.kind === "quantity") return evaluate(definition.body, { ...scope, indexes: new Map() });
   const index = scope.indexes.get(name.at(-1) ?? "");
@@ -105,8 +107,6 @@ function holds({ left, sign, right }: Relation, scope: Scope): boolean {
       return a <= b;
     case "\\ge":
       return a >= b;
-    case "\\ne":
-      return a !== b;
   }
 }
 

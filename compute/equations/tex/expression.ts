@@ -48,5 +48,5 @@ export interface Relation {
   readonly right: Expression;
 }
 
-export const relationSigns = ["=", "<", ">", "\\le", "\\ge", "\\ne"] as const;
+export const relationSigns = ["=", "<", ">", "\\le", "\\ge"] as const;
 export type RelationSign = (typeof relationSigns)[number];

@@ -122,10 +122,10 @@ function scriptToken(node: KatexNode): Token {
   if (base?.type === "op" && base.name === "\\sum") {
     return { kind: "series", below: readTokens(children(node.sub)), above: readTokens(children(node.sup)) };
   }
+  if (base?.type === "atom") throw new Error("no reading for a power on a bare bracket: use \\left and \\right");
   const symbol = spellNode(node);
   const [raised, ...rest] = symbol ? [{ kind: "symbol", ...symbol } as Token] : readTokens(children(node.base));
   if (!raised || rest.length > 0 || (!symbol && node.sub)) throw new Error("no reading for this base of a script");
-  if (raised.kind === "close") throw new Error("no reading for a power on a bare bracket: use \\left and \\right");
   if (raised.kind === "function")
     throw new Error("no reading for a script on a function: put the function in brackets");
   const power = node.sup && primeCount(node) === 0 ? readTokens(children(node.sup)) : undefined;
