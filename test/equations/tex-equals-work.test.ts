@@ -1,9 +1,9 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import type { Equation } from "../../compute/equations/equation.ts";
-import { InputError } from "../../compute/equations/input-error.ts";
 import { equationIds, equationOf } from "../../compute/equations/registry.ts";
 import { evaluateTex } from "../../compute/equations/tex/evaluate-tex.ts";
+import { accepts } from "../helpers/accepts.ts";
 import { type AnyInputs, validInputs } from "../helpers/valid-inputs.ts";
 import { branchEdges } from "./branch-edges.ts";
 
@@ -19,16 +19,6 @@ function expectEqual(equation: Equation, inputs: AnyInputs): void {
   const read = evaluateTex(equation, inputs);
   const message = `${equation.id} ${JSON.stringify(inputs)}: TeX gives ${read}, the function ${worked}`;
   expect(Math.abs(read - worked), message).toBeLessThanOrEqual(allowed(worked));
-}
-
-function accepts(equation: Equation, inputs: AnyInputs): boolean {
-  try {
-    equation.of(inputs as never);
-    return true;
-  } catch (error) {
-    if (error instanceof InputError) return false;
-    throw error;
-  }
 }
 
 describe.each(equationIds)("%s: the TeX works out what the function works out", (id) => {
