@@ -9,7 +9,7 @@ const root = path.resolve(path.dirname(fileURLToPath(import.meta.url)), "../..")
 
 const result = await esbuild.build({
   absWorkingDir: root,
-  entryPoints: ["compute/command/main.ts"],
+  entryPoints: ["./compute/command/main.ts"],
   bundle: true,
   platform: "node",
   format: "esm",

@@ -2,7 +2,7 @@ import type { Equation, InputSpecs, Inputs } from "./equation.ts";
 
 /** One equation as it was worked out: enough to print it again with its numbers. */
 export interface Step {
-  /** Where in the chain: activity, plant, receptor point, path, band … from the outside in. */
+  /** Where in the chain, from the outside in: `activity:pressing-piles`, `item:piler`, `band:500` … */
   readonly at: readonly string[];
   /** Which part of the level this is, as a key of the wording's `terms`. */
   readonly term: string;
@@ -45,4 +45,24 @@ export function recording(steps: Step[], at: readonly string[] = []): Working {
     },
     at: (...place) => recording(steps, [...at, ...place]),
   };
+}
+
+/** Works equations out and adds the id of each to `used`. */
+export function noting(used: Set<string>): Working {
+  const working: Working = {
+    work: (equation, inputs) => {
+      used.add(equation.id);
+      return equation.of(inputs);
+    },
+    at: () => working,
+  };
+  return working;
+}
+
+/** Whether a step belongs to a chain: no place of it names another activity, item, path, band or day than the subject's. */
+export function belongsTo(step: Step, subject: Readonly<Record<string, string>>): boolean {
+  return step.at.every((place) => {
+    const [kind = "", name] = place.split(":");
+    return subject[kind] === undefined || subject[kind] === name;
+  });
 }

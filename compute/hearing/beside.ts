@@ -2,7 +2,7 @@ import type { Working } from "../equations/working.ts";
 import { silently } from "../equations/working.ts";
 import type { Place } from "../geometry/place.ts";
 import { zoneSumDba } from "./zone-distance.ts";
-import type { ZoneMachine } from "./zone-machine.ts";
+import type { WalledMachine } from "./zone-machine.ts";
 import { distanceToMachineM } from "./zone-machine.ts";
 
 /** Directions in which the level beside a machine is looked at. */
@@ -16,15 +16,15 @@ const DIRECTIONS = 72;
  * @param together  all machines that may run at the same time, this one among them
  * @returns         level [dB(A)], unrounded
  */
-export function highestBesideDba(working: Working, machine: ZoneMachine, together: readonly ZoneMachine[]): number {
+export function highestBesideDba(working: Working, machine: WalledMachine, together: readonly WalledMachine[]): number {
   const places = Array.from({ length: DIRECTIONS }, (_, index) => beside(machine, (2 * Math.PI * index) / DIRECTIONS));
   const levels = places.map((place) => zoneSumDba(silently, together, place));
   const loudest = places[levels.indexOf(Math.max(...levels))] as Place;
-  return zoneSumDba(working.at("beside"), together, loudest);
+  return zoneSumDba(working.at("place:beside"), together, loudest);
 }
 
 /** The place 1 m outside outline and swing in a direction from the machine's position, on the near side by less than 0.1 mm. */
-function beside(machine: ZoneMachine, angle: number): Place {
+function beside(machine: WalledMachine, angle: number): Place {
   const placeAt = (m: number): Place => ({
     xM: machine.at.xM + m * Math.sin(angle),
     yM: machine.at.yM + m * Math.cos(angle),

@@ -97,7 +97,7 @@ function peakReasons(working: Working, place: Place, value: ActionValue): readon
   if (!peak || value.peakDbc === undefined) return [];
   const { levelDbc, distanceM: atDistanceM } = peak;
   const reachM = working
-    .at(machine)
+    .at(`machine:${machine}`)
     .work(distanceToLevel, { levelDb: levelDbc, atDistanceM, targetDb: value.peakDbc }, "peak-distance");
   const reached = meets(levelDbc, value.peakDbc, value.peakComparator) || meets(reachM, 1, value.peakComparator);
   return reached ? [{ kind: "peak", machine, levelDbc }] : [];

@@ -2,7 +2,8 @@ import { sumLevels } from "../equations/levels/sum-levels.ts";
 import type { Working } from "../equations/working.ts";
 import { silently } from "../equations/working.ts";
 import type { Place } from "../geometry/place.ts";
-import type { ZoneMachine } from "./zone-machine.ts";
+import { planDistanceM } from "../geometry/place.ts";
+import type { WalledMachine } from "./zone-machine.ts";
 import { distanceToMachineM, machineLevelDba } from "./zone-machine.ts";
 
 /** The place farthest from a machine at which the sum meets the edge level while this machine gives the largest part. */
@@ -13,11 +14,11 @@ export interface ZoneReach {
 }
 
 /** Directions looked at round a machine, and steps along each; the crossing is then halved down to a millimetre. */
-const DIRECTIONS = 120;
-const STEPS = 150;
+const DIRECTIONS = 72;
+const STEPS = 80;
 
 /** Level of all machines together at a place [dB(A)], by the zone rule. */
-export function zoneSumDba(working: Working, machines: readonly ZoneMachine[], place: Place): number {
+export function zoneSumDba(working: Working, machines: readonly WalledMachine[], place: Place): number {
   return working.work(
     sumLevels,
     { levelsDb: machines.map((machine) => machineLevelDba(working, machine, place)) },
@@ -35,13 +36,17 @@ export function zoneSumDba(working: Working, machines: readonly ZoneMachine[], p
  * @returns         the farthest such place, at least 1 m out; nothing if another machine leads wherever the edge level is met
  */
 export function zoneReach(
-  machine: ZoneMachine,
-  together: readonly ZoneMachine[],
+  machine: WalledMachine,
+  together: readonly WalledMachine[],
   edgeDba: number,
 ): ZoneReach | undefined {
   const leads = (place: Place) => isLedBy(machine, together, place, edgeDba);
-  const outermostM = reachBoundM(machine, together.length, edgeDba) + machine.largestDimensionM + machine.swingM;
-  const reaches = directions().flatMap((direction) => farthestAlong(machine, direction, outermostM, leads) ?? []);
+  const corners = machine.outline.map((corner) => planDistanceM(corner, machine.at));
+  const outermostM = reachBoundM(machine, together.length, edgeDba) + Math.max(machine.swingM, ...corners);
+  // Alone, the level falls with distance from the outline only: one direction shows it.
+  const reaches = directions(together.length === 1 ? 1 : DIRECTIONS).flatMap(
+    (direction) => farthestAlong(machine, direction, outermostM, leads) ?? [],
+  );
   return reaches.reduce<ZoneReach | undefined>(
     (kept, next) => (kept && kept.distanceM >= next.distanceM ? kept : next),
     undefined,
@@ -49,27 +54,27 @@ export function zoneReach(
 }
 
 /** Beyond this distance a place that the machine leads cannot meet the edge level: all others are taken to be as loud. */
-function reachBoundM(machine: ZoneMachine, count: number, edgeDba: number): number {
-  const highestDba = machine.powerDba + 10 * Math.log10(count) + 3 * machine.wallsM.length;
+function reachBoundM(machine: WalledMachine, count: number, edgeDba: number): number {
+  const highestDba = machine.powerDba + 10 * Math.log10(count) + 3 * machine.walls;
   return Math.max(1, Math.sqrt(10 ** (0.1 * (highestDba - edgeDba)) / (2 * Math.PI)));
 }
 
-function isLedBy(machine: ZoneMachine, together: readonly ZoneMachine[], place: Place, edgeDba: number): boolean {
+function isLedBy(machine: WalledMachine, together: readonly WalledMachine[], place: Place, edgeDba: number): boolean {
   const ownDba = machineLevelDba(silently, machine, place);
   if (ownDba + 10 * Math.log10(together.length) < edgeDba) return false;
   if (together.some((other) => other !== machine && machineLevelDba(silently, other, place) > ownDba)) return false;
   return zoneSumDba(silently, together, place) >= edgeDba;
 }
 
-function directions(): readonly { readonly x: number; readonly y: number }[] {
-  return Array.from({ length: DIRECTIONS }, (_, index) => {
-    const angle = (2 * Math.PI * index) / DIRECTIONS;
+function directions(count: number): readonly { readonly x: number; readonly y: number }[] {
+  return Array.from({ length: count }, (_, index) => {
+    const angle = (2 * Math.PI * index) / count;
     return { x: Math.sin(angle), y: Math.cos(angle) };
   });
 }
 
 function farthestAlong(
-  machine: ZoneMachine,
+  machine: WalledMachine,
   direction: { readonly x: number; readonly y: number },
   outermostM: number,
   leads: (place: Place) => boolean,

@@ -25,6 +25,11 @@ export interface ZoneMachine {
   readonly open: boolean;
 }
 
+/** A machine with the number of walls that its level is raised for: those nearer to it than the edge of its zone. */
+export interface WalledMachine extends ZoneMachine {
+  readonly walls: number;
+}
+
 /** Distance from a place to the nearest point of a machine's outline and swing, 0 on it [m]. */
 export function distanceToMachineM(machine: ZoneMachine, place: Place): number {
   return Math.max(
@@ -35,12 +40,12 @@ export function distanceToMachineM(machine: ZoneMachine, place: Place): number {
 
 /**
  * Level of a machine at a place by the zone rule: hemispherical over hard ground, never nearer than 1 m, 3 dB more for
- * each wall nearer to the machine than the place.
+ * each wall nearer to the machine than the edge of its zone.
  *
  * @returns level [dB(A)], unrounded
  */
-export function machineLevelDba(working: Working, machine: ZoneMachine, place: Place): number {
+export function machineLevelDba(working: Working, machine: WalledMachine, place: Place): number {
   const distanceM = Math.max(1, distanceToMachineM(machine, place));
-  const walls = machine.wallsM.filter((wallM) => wallM < distanceM).length;
-  return working.at(machine.id).work(zoneLevel, { powerDba: machine.powerDba, distanceM, walls }, "zone-level");
+  const { powerDba, walls } = machine;
+  return working.at(`machine:${machine.id}`).work(zoneLevel, { powerDba, distanceM, walls }, "zone-level");
 }

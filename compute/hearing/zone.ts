@@ -3,7 +3,7 @@ import type { Working } from "../equations/working.ts";
 import type { Place } from "../geometry/place.ts";
 import { highestBesideDba } from "./beside.ts";
 import { zoneReach, zoneSumDba } from "./zone-distance.ts";
-import type { ZoneMachine } from "./zone-machine.ts";
+import type { WalledMachine } from "./zone-machine.ts";
 
 /** Where ear protection is mandatory round one machine. */
 export type Zone =
@@ -47,8 +47,8 @@ export interface ZoneEdges {
  */
 export function zoneOf(
   working: Working,
-  machine: ZoneMachine,
-  together: readonly ZoneMachine[],
+  machine: WalledMachine,
+  together: readonly WalledMachine[],
   edges: ZoneEdges,
 ): Zone {
   if (machine.impulsive && !machine.peak) {
@@ -62,7 +62,7 @@ export function zoneOf(
   if (!machine.open) return { kind: "whole-space", machine: machine.id };
   const reach = loud ? zoneReach(machine, together, edges.levelDba) : undefined;
   if (reach && reach.distanceM >= (peakM ?? 0)) {
-    zoneSumDba(working.at("edge"), together, reach.at);
+    zoneSumDba(working.at("place:edge"), together, reach.at);
     return distanceZone(machine, reach.distanceM, reach.at, "level");
   }
   if (peakM !== undefined) return distanceZone(machine, peakM, machine.at, "peak");
@@ -70,7 +70,7 @@ export function zoneOf(
   return loudBeside ? { kind: "inside-another", machine: machine.id } : distanceZone(machine, 1, machine.at, "level");
 }
 
-function distanceZone(machine: ZoneMachine, distanceM: number, at: Place, by: "level" | "peak"): Zone {
+function distanceZone(machine: WalledMachine, distanceM: number, at: Place, by: "level" | "peak"): Zone {
   return {
     kind: "distance",
     machine: machine.id,
@@ -82,7 +82,7 @@ function distanceZone(machine: ZoneMachine, distanceM: number, at: Place, by: "l
 }
 
 /** Distance within which peak data reach the peak criterion [m], at least 1; nothing without data, criterion or reach. */
-function peakDistanceM(working: Working, machine: ZoneMachine, edgeDbc: number | undefined): number | undefined {
+function peakDistanceM(working: Working, machine: WalledMachine, edgeDbc: number | undefined): number | undefined {
   if (!machine.peak || edgeDbc === undefined) return undefined;
   const distanceM = working.work(
     distanceToLevel,

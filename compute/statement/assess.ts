@@ -37,7 +37,7 @@ export function assess(
   controlIds: ReadonlySet<string>,
   cache: ItemLevelCache = new Map(),
 ): Assessment {
-  const built = scene(working.at("scene"), inputs, controlIds);
+  const built = scene(working.at("part:scene"), inputs, controlIds);
   return {
     scene: built,
     itemLevels: (activityId, pointId) => {
@@ -48,7 +48,12 @@ export function assess(
         const known = cache.get(key);
         // On-time and stops are not part of the level while running, so a cached level takes this scene's item.
         if (known) return { ...known, item };
-        const level = itemLevel(working.at(activity.id, item.id, point.id), activity, item, point);
+        const level = itemLevel(
+          working.at(`activity:${activity.id}`, `item:${item.id}`, `point:${point.id}`),
+          activity,
+          item,
+          point,
+        );
         cache.set(key, level);
         return level;
       });

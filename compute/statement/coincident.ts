@@ -8,8 +8,8 @@ const WHOLE_DAY: ClockWindow = { days: [], from: "00:00", to: "24:00" };
 
 /** Whether two activities are ever at work at the same moment of the same day. */
 export function everCoincide(a: Activity, b: Activity): boolean {
-  const from = a.from > b.from ? a.from : b.from;
-  const until = a.until < b.until ? a.until : b.until;
+  const [, from = a.from] = [a.from, b.from].sort();
+  const [until = a.until] = [a.until, b.until].sort();
   return datesFrom(from, until).some((date) => {
     const others = stretchesInPeriod(b, WHOLE_DAY, date);
     return stretchesInPeriod(a, WHOLE_DAY, date).some((own) =>

@@ -48,9 +48,9 @@ export function periodLevel(
   ref: RuleRef,
   pointId: string,
 ): PeriodLevel | undefined {
-  const here = working.at(ref.id, pointId);
+  const here = working.at(`rule:${ref.id}`, `point:${pointId}`);
   const levels = distinctDays(inputs, assessment, ref.rule).map((day) =>
-    dayLevel(here.at(day.date), assessment, ref.rule, day, pointId),
+    dayLevel(here.at(`day:${day.date}`), assessment, ref.rule, day, pointId),
   );
   return levels.reduce<PeriodLevel | undefined>(
     (loudest, next) => (loudest && loudest.levelDba >= next.levelDba ? loudest : next),
@@ -106,7 +106,7 @@ function wholePeriod(
       .itemLevels(id, pointId)
       .map(({ item, levelDba }) =>
         working
-          .at(id, item.id)
+          .at(`activity:${id}`, `item:${item.id}`)
           .work(
             periodLevelEquation,
             { levelDb: levelDba, onTimePct: item.onTimePct, windowH, periodH },
@@ -133,7 +133,7 @@ function worstStretch(
       sumLevels,
       {
         levelsDb: set.map(({ activity }) =>
-          activityWorst(working.at(activity.id), assessment, activity, minutes, pointId),
+          activityWorst(working.at(`activity:${activity.id}`), assessment, activity, minutes, pointId),
         ),
       },
       "worst-stretch-level",
@@ -157,7 +157,7 @@ function activityWorst(
 }
 
 function itemWorst(working: Working, { item, levelDba }: ItemLevel, averagingMin: number): number {
-  const here = working.at(item.id);
+  const here = working.at(`item:${item.id}`);
   const share = item.run
     ? here.work(worstShare, { onTimePct: item.onTimePct, ...item.run, averagingMin }, "worst-share")
     : 1;

@@ -101,7 +101,9 @@ function sceneActivity(
         })),
       screenOverHardGround: project.method.screenOverHardGround,
     },
-    items: activity.plant.map((item) => sceneItem(working.at(item.id), inputs, there, item)),
+    items: activity.plant.map((item) =>
+      sceneItem(working.at(`activity:${activity.id}`, `item:${item.id}`), inputs, there, item),
+    ),
   };
 }
 
@@ -137,7 +139,7 @@ function sceneItem(working: Working, inputs: StatementInputs, there: readonly Co
 
 function controlLoss(working: Working, inputs: StatementInputs, enclosures: readonly EnclosureControl[]): Bands {
   const losses = enclosures.map((control) =>
-    enclosureInsertionLoss(working.at(control.id), enclosureOf(inputs, control)),
+    enclosureInsertionLoss(working.at(`control:${control.id}`), enclosureOf(inputs, control)),
   );
   // Insertion losses of two enclosures do not add: the better one counts in each band.
   return perBand((bandHz) => Math.max(0, ...losses.map((loss) => loss[bandHz])));

@@ -15,8 +15,8 @@ export function windowLevel(working: Working, assessment: Assessment, activityId
     .itemLevels(activityId, pointId)
     .map(({ item, levelDba }) =>
       working
-        .at(activityId, item.id, pointId)
+        .at(`activity:${activityId}`, `item:${item.id}`, `point:${pointId}`)
         .work(shareLevel, { levelDb: levelDba, share: item.onTimePct / 100 }, "on-time-level"),
     );
-  return working.at(activityId, pointId).work(sumLevels, { levelsDb: shares }, "window-level");
+  return working.at(`activity:${activityId}`, `point:${pointId}`).work(sumLevels, { levelsDb: shares }, "window-level");
 }

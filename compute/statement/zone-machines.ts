@@ -8,7 +8,7 @@ import type { Working } from "../equations/working.ts";
 import { crossing } from "../geometry/crossing.ts";
 import { distanceToOutlineM, distanceToSegmentM, rectangle, sides } from "../geometry/outline.ts";
 import type { Place } from "../geometry/place.ts";
-import { side } from "../geometry/place.ts";
+import { planDistanceM, side } from "../geometry/place.ts";
 import type { ZoneMachine } from "../hearing/zone-machine.ts";
 import { bandsOf } from "./emission-of.ts";
 import type { StatementInputs } from "./inputs.ts";
@@ -24,7 +24,9 @@ export function zoneMachines(
   inputs: StatementInputs,
   activity: SceneActivity,
 ): readonly ZoneMachine[] {
-  return activity.items.map((item) => zoneMachine(working.at(activity.id, item.id), inputs, activity, item));
+  return activity.items.map((item) =>
+    zoneMachine(working.at(`activity:${activity.id}`, `item:${item.id}`), inputs, activity, item),
+  );
 }
 
 function zoneMachine(working: Working, inputs: StatementInputs, activity: SceneActivity, item: SceneItem): ZoneMachine {
@@ -62,15 +64,27 @@ function enclosureNamed(inputs: StatementInputs, item: SceneItem): boolean {
   );
 }
 
-/** Walls of buildings that face a machine, and the straight runs of screens that stand. */
-function reflecting(inputs: StatementInputs, activity: SceneActivity, at: Place): readonly (readonly [Place, Place])[] {
-  const faces = inputs.project.buildings.flatMap((building) =>
+type Wall = readonly [Place, Place];
+
+/** Walls of buildings that face a machine, and the straight runs of screens that stand; each building and screen counts at least once. */
+function reflecting(inputs: StatementInputs, activity: SceneActivity, at: Place): readonly Wall[] {
+  const faces = inputs.project.buildings.map((building) =>
     sides(building.outline).filter(([a, b]) => side(a, b, at) * orientation(building.outline) < 0),
   );
-  const runs = activity.site.screens.flatMap((screen) =>
+  const runs = activity.site.screens.map((screen) =>
     screen.line.slice(1).map((to, index) => [screen.line[index] as Place, to] as const),
   );
-  return [...faces, ...runs];
+  return [...faces, ...runs].flatMap((walls) => squareTo(walls, at));
+}
+
+/** The walls that a machine stands square to, which are those that mirror it; where there is none, the nearest. */
+function squareTo(walls: readonly Wall[], at: Place): readonly Wall[] {
+  const square = walls.filter(
+    ([a, b]) => distanceToSegmentM(at, a, b) < Math.min(planDistanceM(at, a), planDistanceM(at, b)),
+  );
+  if (square.length > 0) return square;
+  const nearest = Math.min(...walls.map(([a, b]) => distanceToSegmentM(at, a, b)));
+  return walls.filter(([a, b]) => distanceToSegmentM(at, a, b) === nearest).slice(0, 1);
 }
 
 /** Above 0 for an outline given anticlockwise, below 0 for one given clockwise. */
@@ -78,7 +92,7 @@ function orientation(outline: readonly Place[]): number {
   return sides(outline).reduce((sum, [a, b]) => sum + (a.xM * b.yM - b.xM * a.yM), 0);
 }
 
-function wallDistanceM([a, b]: readonly [Place, Place], outline: readonly Place[], at: Place, swingM: number): number {
+function wallDistanceM([a, b]: Wall, outline: readonly Place[], at: Place, swingM: number): number {
   const touches = sides(outline).some(([c, d]) => crossing(a, b, c, d));
   const fromOutline = Math.min(
     distanceToOutlineM(a, outline),

@@ -5,6 +5,7 @@ import type { Shift } from "../hearing/edge-level.ts";
 import { zoneEdgeDba } from "../hearing/edge-level.ts";
 import type { Duty, Notice } from "../hearing/notice.ts";
 import { notice } from "../hearing/notice.ts";
+import { withWalls } from "../hearing/walls.ts";
 import type { Zone } from "../hearing/zone.ts";
 import { zoneOf } from "../hearing/zone.ts";
 import type { ZoneMachine } from "../hearing/zone-machine.ts";
@@ -57,14 +58,15 @@ export function earProtection(working: Working, inputs: StatementInputs, assessm
     assessment.scene.activities.map((activity) => [activity.id, zoneMachines(working, inputs, activity)] as const),
   );
   const located = assessment.scene.activities.flatMap((activity) =>
-    (machines.get(activity.id) ?? []).map((machine) => ({
-      activity,
-      machine,
-      together: togetherWith(machine, activity, assessment.scene, machines),
-    })),
+    (machines.get(activity.id) ?? []).map((each) => {
+      const together = withWalls(togetherWith(each, activity, assessment.scene, machines), edgeDba);
+      const machine = together.find(({ id }) => id === each.id);
+      if (!machine) throw new Error(`${each.id} does not run with itself`);
+      return { activity, machine, together };
+    }),
   );
   const zones = located.map(({ activity, machine, together }): ItemZone => {
-    const here = working.at(activity.id, machine.id);
+    const here = working.at(`activity:${activity.id}`, `item:${machine.id}`);
     const zone = zoneOf(here, machine, together, { levelDba: edgeDba, peakDbc });
     return {
       activity: activity.id,

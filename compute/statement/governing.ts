@@ -1,0 +1,78 @@
+import type { BandHz } from "../acoustics/bands.ts";
+import { A_WEIGHTS_DB, BANDS_HZ } from "../acoustics/bands.ts";
+import type { PathTerms } from "../acoustics/propagate.ts";
+import type { Step } from "../equations/working.ts";
+import { belongsTo, recording, silently } from "../equations/working.ts";
+import type { ItemLevel } from "./assess.ts";
+import { assess } from "./assess.ts";
+import { adoptedIds } from "./control-sets.ts";
+import type { PeriodFigure } from "./figures-of.ts";
+import type { StatementInputs } from "./inputs.ts";
+import { limitRules } from "./limit-rules.ts";
+import { periodLevel } from "./period-level.ts";
+
+/** The source, path and band that decide at a receptor point, with every step from its sound power to the judged level. */
+export interface Governing {
+  readonly point: string;
+  readonly rule: string;
+  readonly activity: string;
+  readonly item: string;
+  readonly path: PathTerms["path"];
+  readonly bandHz: BandHz;
+  readonly steps: readonly Step[];
+}
+
+/**
+ * For each receptor point the governing rule (closest to its limit or farthest over it), and there the source, path and band
+ * with the largest part, worked out with a record.
+ *
+ * @param inputs   documents of the statement
+ * @param periods  judged period levels
+ */
+export function governing(inputs: StatementInputs, periods: readonly PeriodFigure[]): readonly Governing[] {
+  const points = [...new Set(periods.map(({ point }) => point))];
+  return points.map((point) => {
+    const rules = limitRules(inputs);
+    const margin = (period: PeriodFigure) =>
+      period.levelDba - (rules.find(({ id }) => id === period.rule)?.rule.valueDb ?? 0);
+    const closest = periods
+      .filter((period) => period.point === point)
+      .reduce((kept, next) => (margin(kept) >= margin(next) ? kept : next));
+    return governingAt(inputs, closest);
+  });
+}
+
+function governingAt(inputs: StatementInputs, period: PeriodFigure): Governing {
+  const steps: Step[] = [];
+  const working = recording(steps);
+  const assessment = assess(working, inputs, adoptedIds(inputs));
+  const ref = limitRules(inputs).find(({ id }) => id === period.rule);
+  if (!ref) throw new Error(`there is no limit rule "${period.rule}"`);
+  const { activity, level } = loudestItem(inputs, period);
+  assessment.itemLevels(activity, period.point);
+  periodLevel(working, inputs, assessment, ref, period.point);
+  const { path, bandHz } = loudestPath(level);
+  const subject = { activity, item: level.item.id, path, band: String(bandHz), day: period.date };
+  const kept = steps.filter((step) => belongsTo(step, subject));
+  return { point: period.point, rule: period.rule, activity, item: level.item.id, path, bandHz, steps: kept };
+}
+
+/** The item with the largest part in a period level: level while running, on-time and hours together. */
+function loudestItem(inputs: StatementInputs, period: PeriodFigure): { activity: string; level: ItemLevel } {
+  const assessment = assess(silently, inputs, adoptedIds(inputs));
+  const parts = period.activities.flatMap(({ id, windowH }) =>
+    assessment.itemLevels(id, period.point).map((level) => ({
+      activity: id,
+      level,
+      partDb: level.levelDba + 10 * Math.log10((level.item.onTimePct / 100) * windowH),
+    })),
+  );
+  return parts.reduce((kept, next) => (kept.partDb >= next.partDb ? kept : next));
+}
+
+function loudestPath({ propagation }: ItemLevel): { path: PathTerms["path"]; bandHz: BandHz } {
+  const parts = propagation.paths.flatMap((path) =>
+    BANDS_HZ.map((bandHz) => ({ path: path.path, bandHz, partDb: path.levelDb[bandHz] + A_WEIGHTS_DB[bandHz] })),
+  );
+  return parts.reduce((kept, next) => (kept.partDb >= next.partDb ? kept : next));
+}
