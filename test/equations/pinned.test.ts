@@ -31,7 +31,9 @@ function pin(equation: Equation): Pinned {
   const arbitrary = validInputs(equation)
     .map((inputs) => Object.fromEntries(Object.entries(inputs).map(([name, value]) => [name, rounded(value)])))
     .filter((inputs) => accepts(equation, inputs));
-  const samples = fc.sample(arbitrary, { seed: 1996, numRuns: SAMPLES });
+  const drawn = fc.sample(arbitrary, { seed: 1996, numRuns: 10 * SAMPLES });
+  const distinct = [...new Map(drawn.map((inputs) => [JSON.stringify(inputs), inputs])).values()];
+  const samples = [...distinct, ...drawn].slice(0, SAMPLES);
   return {
     id: equation.id,
     version: equation.version,

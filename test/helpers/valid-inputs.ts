@@ -9,7 +9,7 @@ function oneValue(spec: InputSpec): fc.Arbitrary<number> {
   const { min, max } = spec;
   const span = max - min;
   const evenly = fc.integer({ min: 1, max: 2 ** 30 }).map((step) => min + (span * step) / 2 ** 30);
-  const byMagnitude = fc.integer({ min: 0, max: 9000 }).map((step) => min + span * 10 ** (-step / 1000));
+  const byMagnitude = fc.integer({ min: 0, max: 6000 }).map((step) => min + span * 10 ** (-step / 1000));
   const first = spec.aboveMin ? Math.floor(min) + 1 : Math.ceil(min);
   const wholes = first <= max ? fc.integer({ min: first, max: Math.floor(max) }) : evenly;
   const ends = spec.aboveMin ? fc.constant(max) : fc.constantFrom(min, max);
