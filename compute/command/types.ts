@@ -1,6 +1,17 @@
 import { mkdirSync, readdirSync, readFileSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import { typesFromSchemas } from "../documents/types-from-schemas.ts";
+import type { Command } from "./command.ts";
+import { usage } from "./command.ts";
+
+export const command: Command = {
+  summary: "writes the TypeScript types of the schemas",
+  help: `npm run types
+
+Writes compute/documents/types/<name>.gen.ts for every schema/<name>.schema.json. Needs the development packages.
+`,
+  run: (args, place) => (args.length > 0 ? usage("types", "expected no further words") : types(place.root)),
+};
 
 /** Writes compute/documents/types/<name>.gen.ts for every schema/<name>.schema.json. */
 export async function types(root: string): Promise<{ code: number; out: string; err: string }> {

@@ -25,7 +25,7 @@ function ofStatement(set: DocumentSet, { file, statement }: PlacedStatement): Mi
     );
     if (activity.until < activity.from)
       notBefore(`${here}/until`, activity.until, activity.from, "The activity cannot end before it begins.");
-    else
+    else if (statement.until >= statement.from)
       notAfter(
         `${here}/until`,
         activity.until,

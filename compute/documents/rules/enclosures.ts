@@ -7,7 +7,7 @@ import type { EnclosureControl } from "../types/statement.gen.ts";
 /** Above this share of the whole surface an enclosure is a partial one [%]. */
 const MOST_OPEN_PCT = 5;
 
-/** An enclosure is a full one, its lining fits on its faces, and what is not lined says what it is. */
+/** An enclosure is a full one, and its lining fits on its faces. */
 export const enclosures: Rule = (set) =>
   statementsOf(set).flatMap(({ file, statement }) =>
     statement.controls.flatMap((control, index) =>
@@ -46,12 +46,6 @@ function ofEnclosure(set: DocumentSet, file: string, control: EnclosureControl, 
         `${control.lining.areaM2} m²`,
         "Enter the area inside the faces that is lined.",
       ),
-    );
-  }
-  if (control.lining.areaM2 < facesM2 && control.unlinedSheet === undefined) {
-    const expected = `a lining sheet for the ${facesM2 - control.lining.areaM2} m² that are not lined`;
-    found.push(
-      mistakeAt(set.texts, file, `${here}/unlinedSheet`, expected, "nothing", "Name the sheet of the bare inside."),
     );
   }
   return found;

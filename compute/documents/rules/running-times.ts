@@ -3,6 +3,9 @@ import type { Mistake } from "../mistake.ts";
 import { mistakeAt } from "../mistake-at.ts";
 import { plantItems } from "../plant-items.ts";
 import { type PlacedStatement, statementsOf } from "../statements-of.ts";
+import type { PlantItem, QuieterPlantControl, RunningTimeControl } from "../types/statement.gen.ts";
+
+type Words = readonly [field: string, expected: string, received: string, advice: string];
 
 const CYCLE_ADVICE =
   "The level already holds the stops of the cycle: write 100, or use a sheet with the level while running.";
@@ -27,44 +30,34 @@ function controls(set: DocumentSet, { file, statement }: PlacedStatement): Mista
   const items = new Map(plantItems(statement).map(({ item }) => [item.id, item]));
   return statement.controls.flatMap((control, index) => {
     if (control.kind !== "running-time" && control.kind !== "quieter-plant") return [];
-    const found: Mistake[] = [];
-    const add = (field: string, expected: string, received: string, advice: string) =>
-      found.push(mistakeAt(set.texts, file, `/controls/${index}/${field}`, expected, received, advice));
-    for (const [position, id] of control.appliesTo.entries()) {
+    return control.appliesTo.flatMap((id, position) => {
       const item = items.get(id);
-      if (!item) continue;
-      if (control.kind === "quieter-plant") {
-        if (control.insteadOf === item.sheet) {
-          add(
-            "insteadOf",
-            `a sheet other than that of "${id}"`,
-            `"${control.insteadOf}"`,
-            "Name the plant that would run without this control.",
-          );
-        } else if (item.onTimePct < 100 && holdsCycle(set, control.insteadOf)) {
-          add(
-            "insteadOf",
-            `a sheet with the level while running, as "${id}" runs ${item.onTimePct} % of the time`,
-            `"${control.insteadOf}", whose level holds the work cycle`,
-            "Use another sheet for what would run without this control.",
-          );
-        }
-      } else if (holdsCycle(set, item.sheet)) {
-        add(
-          `appliesTo/${position}`,
-          "an item with a level while running",
-          `"${id}", whose level holds the work cycle`,
-          "Use a sheet with the level while running.",
-        );
-      } else if (control.insteadOfPct <= item.onTimePct) {
-        add(
-          "insteadOfPct",
-          `more than the ${item.onTimePct} % that "${id}" runs with this control`,
-          `${control.insteadOfPct} %`,
-          "Enter the on-time there would be without this control.",
-        );
-      }
-    }
-    return found;
+      if (!item) return [];
+      const words =
+        control.kind === "running-time" ? shorter(set, control, item, position) : quieter(set, control, item);
+      return words.map(([field, ...rest]) => mistakeAt(set.texts, file, `/controls/${index}/${field}`, ...rest));
+    });
   });
+}
+
+function quieter(set: DocumentSet, { insteadOf }: QuieterPlantControl, item: PlantItem): Words[] {
+  if (insteadOf === item.sheet) {
+    const advice = "Name the plant that would run without this control.";
+    return [["insteadOf", `a sheet other than that of "${item.id}"`, `"${insteadOf}"`, advice]];
+  }
+  if (item.onTimePct === 100 || !holdsCycle(set, insteadOf)) return [];
+  const expected = `a sheet with the level while running, as "${item.id}" runs ${item.onTimePct} % of the time`;
+  const advice = "Use another sheet for what would run without this control.";
+  return [["insteadOf", expected, `"${insteadOf}", whose level holds the work cycle`, advice]];
+}
+
+function shorter(set: DocumentSet, { insteadOfPct }: RunningTimeControl, item: PlantItem, position: number): Words[] {
+  if (holdsCycle(set, item.sheet)) {
+    const received = `"${item.id}", whose level holds the work cycle`;
+    const advice = "Use a sheet with the level while running.";
+    return [[`appliesTo/${position}`, "an item with a level while running", received, advice]];
+  }
+  if (insteadOfPct > item.onTimePct) return [];
+  const expected = `more than the ${item.onTimePct} % that "${item.id}" runs with this control`;
+  return [["insteadOfPct", expected, `${insteadOfPct} %`, "Enter the on-time there would be without this control."]];
 }
