@@ -1,17 +1,24 @@
+import { RecordError } from "../record/issued-revisions.ts";
 import type { Command, Outcome, Place } from "./command.ts";
-
-const COMMANDS: Readonly<Record<string, () => Promise<Command>>> = {
-  types: async () => (await import("./types.ts")).command,
-};
+import { commands } from "./commands.ts";
 
 /** Runs one command and prints what it leaves; the exit status comes back. */
 export async function run(args: readonly string[], place: Place): Promise<number> {
   const [name = "", ...rest] = args;
-  const load = COMMANDS[name];
-  if (!load) return print(await unknown(name));
-  const command = await load();
+  const command = commands[name];
+  if (!command) return print(unknown(name));
   if (rest.includes("--help")) return print({ code: 0, out: command.help, err: "" });
-  return print(await command.run(rest, place));
+  return print(await outcome(command, rest, place));
+}
+
+async function outcome(command: Command, args: readonly string[], place: Place): Promise<Outcome> {
+  try {
+    return await command.run(args, place);
+  } catch (error) {
+    // A sealed file that cannot be trusted is for the user to mend; anything else is our own fault and keeps its trace.
+    if (error instanceof RecordError) return { code: 1, out: "", err: `${error.message}\n` };
+    throw error;
+  }
 }
 
 function print({ code, out, err }: Outcome): number {
@@ -20,10 +27,8 @@ function print({ code, out, err }: Outcome): number {
   return code;
 }
 
-async function unknown(name: string): Promise<Outcome> {
-  const lines = await Promise.all(
-    Object.entries(COMMANDS).map(async ([each, load]) => `  npm run ${each.padEnd(9)} ${(await load()).summary}\n`),
-  );
+function unknown(name: string): Outcome {
+  const lines = Object.entries(commands).map(([each, { summary }]) => `  npm run ${each.padEnd(9)} ${summary}\n`);
   const list = `Commands:\n${lines.join("")}`;
   return name === ""
     ? { code: 0, out: list, err: "" }

@@ -2,7 +2,7 @@ import { existsSync, readdirSync, readFileSync } from "node:fs";
 import path from "node:path";
 import type { Revision } from "../documents/types/revision.gen.ts";
 import { revisionDigest } from "./digest.ts";
-import { shapeProblem } from "./revision-validator.ts";
+import { shapeProblem } from "./shape-problem.ts";
 
 /** The revisions of one phase in the order of their numbers. */
 export interface IssuedPhase {

@@ -2,7 +2,7 @@ import { linkSync, mkdirSync, unlinkSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import type { Revision } from "../documents/types/revision.gen.ts";
 import { revisionFile } from "./issued-revisions.ts";
-import { shapeProblem } from "./revision-validator.ts";
+import { shapeProblem } from "./shape-problem.ts";
 
 /**
  * Writes a revision's file whole or not at all, and never over another.

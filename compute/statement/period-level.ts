@@ -5,13 +5,13 @@ import { shareLevel } from "../equations/levels/share-level.ts";
 import { sumLevels } from "../equations/levels/sum-levels.ts";
 import { worstShare } from "../equations/levels/worst-share.ts";
 import type { Working } from "../equations/working.ts";
-import { datesFrom, dayOf } from "../programme/dates.ts";
 import { setsAtOnce } from "../programme/running-together.ts";
 import type { Stretch } from "../programme/window-hours.ts";
-import { hoursOf, stretchesInPeriod } from "../programme/window-hours.ts";
+import { hoursOf } from "../programme/window-hours.ts";
 import type { Assessment, ItemLevel } from "./assess.ts";
 import type { StatementInputs } from "./inputs.ts";
 import type { RuleRef } from "./limit-rules.ts";
+import { periodDays } from "./period-days.ts";
 import type { SceneActivity } from "./scene.ts";
 
 /** The level a limit is held against on the loudest day of a phase. */
@@ -20,10 +20,19 @@ export interface PeriodLevel {
   /** First date with that level. */
   readonly date: string;
   readonly periodH: number;
-  /** Hours of each activity inside the period on that date; for the worst stretch, those that work at once. */
-  readonly activities: readonly { readonly id: string; readonly windowH: number }[];
+  /** Each activity inside the period on that date; for the worst stretch, those that work at once. */
+  readonly activities: readonly PeriodActivity[];
   /** Added for the facade, 0 where the limit is free field [dB]. */
   readonly facadeDb: number;
+}
+
+/** What of an activity counts in a period. */
+export interface PeriodActivity {
+  readonly id: string;
+  /** Hours inside the period. */
+  readonly windowH: number;
+  /** Items that count, each with the share of the period (or of its worst stretch) in which it runs, above 0 to 1. */
+  readonly shares: readonly { readonly item: string; readonly share: number }[];
 }
 
 interface DayWork {
@@ -49,7 +58,7 @@ export function periodLevel(
   pointId: string,
 ): PeriodLevel | undefined {
   const here = working.at(`rule:${ref.id}`, `point:${pointId}`);
-  const levels = distinctDays(inputs, assessment, ref.rule).map((day) =>
+  const levels = daysOf(inputs, assessment, ref).map((day) =>
     dayLevel(here.at(`day:${day.date}`), assessment, ref.rule, day, pointId),
   );
   return levels.reduce<PeriodLevel | undefined>(
@@ -58,18 +67,15 @@ export function periodLevel(
   );
 }
 
-/** The first day of each kind: days on which the same activities work the same times are one kind. */
-function distinctDays(inputs: StatementInputs, assessment: Assessment, rule: LimitRule): readonly DayWork[] {
-  const kinds = new Map<string, DayWork>();
-  for (const date of datesFrom(inputs.statement.from, inputs.statement.until)) {
-    if (!rule.period.days.includes(dayOf(date))) continue;
-    const work = assessment.scene.activities
-      .map((activity) => ({ activity, stretches: stretchesInPeriod(activity.activity, rule.period, date) }))
-      .filter(({ stretches }) => stretches.length > 0);
-    const kind = JSON.stringify(work.map(({ activity, stretches }) => [activity.id, stretches]));
-    if (work.length > 0 && !kinds.has(kind)) kinds.set(kind, { date, work });
-  }
-  return [...kinds.values()];
+/** The kinds of day of a rule with the activities of this scene. */
+function daysOf(inputs: StatementInputs, assessment: Assessment, ref: RuleRef): readonly DayWork[] {
+  const { activities } = assessment.scene;
+  return periodDays(inputs, ref).map(({ date, work }) => ({
+    date,
+    work: work.flatMap(({ activity: id, stretches }) =>
+      activities.filter((activity) => activity.id === id).map((activity) => ({ activity, stretches })),
+    ),
+  }));
 }
 
 function dayLevel(
@@ -100,7 +106,11 @@ function wholePeriod(
   pointId: string,
 ): FreeFieldLevel {
   const periodH = hoursOf(rule.period);
-  const activities = day.work.map(({ activity, stretches }) => ({ id: activity.id, windowH: lengthH(stretches) }));
+  const activities = day.work.map(({ activity, stretches }) => {
+    const windowH = lengthH(stretches);
+    const share = ({ onTimePct }: { readonly onTimePct: number }) => (onTimePct / 100) * (windowH / periodH);
+    return { id: activity.id, windowH, shares: activity.items.map((item) => ({ item: item.id, share: share(item) })) };
+  });
   const levelsDb = activities.flatMap(({ id, windowH }) =>
     assessment
       .itemLevels(id, pointId)
@@ -126,21 +136,27 @@ function worstStretch(
   pointId: string,
 ): FreeFieldLevel {
   const together = setsAtOnce(day.work.map(({ stretches }) => stretches)).map((set) =>
-    set.map((index) => day.work[index] as DayWork["work"][number]),
+    set.flatMap((index) => day.work[index] ?? []),
   );
-  const levels = together.map((set) => ({
-    levelDba: working.work(
-      sumLevels,
-      {
-        levelsDb: set.map(({ activity }) =>
-          activityWorst(working.at(`activity:${activity.id}`), assessment, activity, minutes, pointId),
-        ),
-      },
-      "worst-stretch-level",
-    ),
-    activities: set.map(({ activity, stretches }) => ({ id: activity.id, windowH: lengthH(stretches) })),
-  }));
+  const levels = together.map((set) => {
+    const worst = set.map(({ activity }) =>
+      activityWorst(working.at(`activity:${activity.id}`), assessment, activity, minutes, pointId),
+    );
+    return {
+      levelDba: working.work(sumLevels, { levelsDb: worst.map(({ levelDba }) => levelDba) }, "worst-stretch-level"),
+      activities: set.map(({ activity, stretches }, index) => ({
+        id: activity.id,
+        windowH: lengthH(stretches),
+        shares: worst[index]?.shares ?? [],
+      })),
+    };
+  });
   return levels.reduce((loudest, next) => (loudest.levelDba >= next.levelDba ? loudest : next));
+}
+
+interface ActivityWorst {
+  readonly levelDba: number;
+  readonly shares: PeriodActivity["shares"];
 }
 
 function activityWorst(
@@ -149,19 +165,31 @@ function activityWorst(
   activity: SceneActivity,
   minutes: number,
   pointId: string,
-): number {
-  const levelsDb = assessment.itemLevels(activity.id, pointId).map((level) => itemWorst(working, level, minutes));
-  // Items that the statement says cannot run together: the loudest alone.
-  if (activity.activity.runTogether.kind === "cannot") return Math.max(...levelsDb);
-  return working.work(sumLevels, { levelsDb }, "worst-stretch-activity");
+): ActivityWorst {
+  const items = assessment.itemLevels(activity.id, pointId).map((level) => itemWorst(working, level, minutes));
+  // Of items that the statement says cannot run together only the loudest counts.
+  const counted =
+    activity.activity.runTogether.kind === "cannot"
+      ? items.filter((item) => isLoudest(item, items)).slice(0, 1)
+      : items;
+  const levelDba = working.work(
+    sumLevels,
+    { levelsDb: counted.map((item) => item.levelDba) },
+    "worst-stretch-activity",
+  );
+  return { levelDba, shares: counted.map(({ item, share }) => ({ item, share })) };
 }
 
-function itemWorst(working: Working, { item, levelDba }: ItemLevel, averagingMin: number): number {
+function isLoudest(item: { readonly levelDba: number }, items: readonly { readonly levelDba: number }[]): boolean {
+  return items.every((other) => other.levelDba <= item.levelDba);
+}
+
+function itemWorst(working: Working, { item, levelDba }: ItemLevel, averagingMin: number) {
   const here = working.at(`item:${item.id}`);
   const share = item.run
     ? here.work(worstShare, { onTimePct: item.onTimePct, ...item.run, averagingMin }, "worst-share")
     : 1;
-  return here.work(shareLevel, { levelDb: levelDba, share }, "worst-stretch-item");
+  return { item: item.id, share, levelDba: here.work(shareLevel, { levelDb: levelDba, share }, "worst-stretch-item") };
 }
 
 function lengthH(stretches: readonly Stretch[]): number {

@@ -20,6 +20,7 @@ export interface TermTable {
   readonly activity: string;
   readonly item: string;
   readonly point: string;
+  readonly onTimePct: number;
   readonly distanceM: number;
   readonly planM: number;
   readonly groundFactors: readonly [source: number, middle: number, receptor: number];
@@ -52,6 +53,7 @@ function termTable(activity: string, point: string, { item, propagation, levelDb
     activity,
     item: item.id,
     point,
+    onTimePct: item.onTimePct,
     distanceM,
     planM,
     groundFactors: [groundFactors.source, groundFactors.middle, groundFactors.receptor],

@@ -8,7 +8,7 @@ import { notice } from "../hearing/notice.ts";
 import { withWalls } from "../hearing/walls.ts";
 import type { Zone } from "../hearing/zone.ts";
 import { zoneOf } from "../hearing/zone.ts";
-import type { ZoneMachine } from "../hearing/zone-machine.ts";
+import type { WalledMachine, ZoneMachine } from "../hearing/zone-machine.ts";
 import type { Assessment } from "./assess.ts";
 import { everCoincide } from "./coincident.ts";
 import type { StatementInputs } from "./inputs.ts";
@@ -57,9 +57,10 @@ export function earProtection(working: Working, inputs: StatementInputs, assessm
   const machines = new Map(
     assessment.scene.activities.map((activity) => [activity.id, zoneMachines(working, inputs, activity)] as const),
   );
+  const walled = wallsOnce(edgeDba);
   const located = assessment.scene.activities.flatMap((activity) =>
     (machines.get(activity.id) ?? []).map((each) => {
-      const together = withWalls(togetherWith(each, activity, assessment.scene, machines), edgeDba);
+      const together = walled(togetherWith(each, activity, assessment.scene, machines));
       const machine = together.find(({ id }) => id === each.id);
       if (!machine) throw new Error(`${each.id} does not run with itself`);
       return { activity, machine, together };
@@ -92,6 +93,17 @@ function shiftOf(inputs: StatementInputs, scene: Scene): Shift {
   const sheets = scene.activities.flatMap((activity) => activity.items.map((item) => item.sheet));
   const uncertainties = sheets.map((sheet) => entry(inputs.plant, sheet, "plant").emission.uncertaintyDb);
   return { shiftH: inputs.statement.shiftH, uncertaintyDb: Math.max(3, ...uncertainties) };
+}
+
+/** Counts the walls of a group of machines once, however often the group comes. */
+function wallsOnce(edgeDba: number): (machines: readonly ZoneMachine[]) => readonly WalledMachine[] {
+  const known = new Map<string, readonly WalledMachine[]>();
+  return (machines) => {
+    const key = machines.map(({ id }) => id).join(" ");
+    const found = known.get(key) ?? withWalls(machines, edgeDba);
+    known.set(key, found);
+    return found;
+  };
 }
 
 /** All machines that may run while this one does; of items that cannot run together only the loudest. */

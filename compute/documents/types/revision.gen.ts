@@ -330,7 +330,7 @@ export interface SealedPeriod {
   facadeDb: number;
 }
 /**
- * Hours of one activity inside a period.
+ * What of one activity counts in a period.
  */
 export interface SealedPeriodActivity {
   /**
@@ -341,6 +341,23 @@ export interface SealedPeriodActivity {
    * Hours inside the period.
    */
   windowH: number;
+  /**
+   * Items that count.
+   */
+  shares: SealedPeriodShare[];
+}
+/**
+ * Part of an item in a period.
+ */
+export interface SealedPeriodShare {
+  /**
+   * Plant item.
+   */
+  item: string;
+  /**
+   * Share of the period, or of its worst stretch, in which it runs.
+   */
+  share: number;
 }
 /**
  * Parts the level of one item at one receptor point is made of, while running, free field, all adopted controls.
@@ -358,6 +375,10 @@ export interface SealedTerms {
    * Receptor point.
    */
   point: string;
+  /**
+   * On-time in the activity's window.
+   */
+  onTimePct: number;
   /**
    * Straight distance.
    */

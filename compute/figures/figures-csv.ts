@@ -1,0 +1,90 @@
+import { stringify } from "csv-stringify/sync";
+import { A_WEIGHTS_DB, BANDS_HZ } from "../acoustics/bands.ts";
+import type { Revision, SealedPeriod, SealedTerms } from "../documents/types/revision.gen.ts";
+
+/** Columns of figures.csv, in order. */
+export const CSV_COLUMNS = [
+  "row",
+  "figure",
+  "value",
+  "unit",
+  "activity",
+  "item",
+  "path",
+  "band_hz",
+  "sound_power_db",
+  "control_loss_db",
+  "divergence_db",
+  "air_db",
+  "ground_db",
+  "screen_db",
+  "cap_db",
+  "path_level_db",
+  "a_weight_db",
+  "on_time_pct",
+  "window_h",
+  "period_h",
+  "share",
+  "facade_db",
+] as const;
+
+type Row = Partial<Record<(typeof CSV_COLUMNS)[number], string | number>>;
+
+/**
+ * figures.csv of a revision: a row per figure, and under each level of a limit's period a row per source, path and band with
+ * every term in its own column, so that a spreadsheet can redo the sum:
+ * value = 10 lg Σ share · 10^((path_level_db + a_weight_db)/10) + facade_db.
+ */
+export function figuresCsv(revision: Revision): string {
+  const figures = revision.figures.map(({ key, value, unit }): Row => ({ row: "figure", figure: key, value, unit }));
+  const terms = revision.periods.flatMap((period) => periodRows(revision, period));
+  return stringify([...figures, ...terms], { header: true, columns: [...CSV_COLUMNS] });
+}
+
+function periodRows(revision: Revision, period: SealedPeriod): readonly Row[] {
+  const levelOf = revision.figures.find(({ key }) => key === period.key);
+  if (!levelOf) throw new Error(`${period.key}: the revision has no such figure`);
+  return period.activities.flatMap(({ id, windowH, shares }) =>
+    shares.flatMap(({ item, share }) => {
+      const terms = revision.terms.find(
+        (each) => each.activity === id && each.item === item && each.point === period.point,
+      );
+      if (!terms) throw new Error(`${period.key}: there are no terms of ${id}/${item}`);
+      return termRows(terms, {
+        row: "term",
+        figure: period.key,
+        value: levelOf.value,
+        unit: levelOf.unit,
+        activity: id,
+        item,
+        on_time_pct: terms.onTimePct,
+        window_h: windowH,
+        period_h: period.periodH,
+        share,
+        facade_db: period.facadeDb,
+      });
+    }),
+  );
+}
+
+function termRows(terms: SealedTerms, common: Row): readonly Row[] {
+  const db = (list: readonly number[], band: number) => (list[band] ?? Number.NaN) / 1000;
+  return terms.paths.flatMap((path) =>
+    BANDS_HZ.map(
+      (bandHz, band): Row => ({
+        ...common,
+        path: path.screen ? `${path.path}:${path.screen}` : path.path,
+        band_hz: bandHz,
+        sound_power_db: db(terms.powerDb, band),
+        control_loss_db: db(terms.controlLossDb, band),
+        divergence_db: terms.divergenceDb / 1000,
+        air_db: db(terms.airDb, band),
+        ground_db: db(terms.groundDb, band),
+        screen_db: db(path.screenDb, band),
+        cap_db: db(path.capDb, band),
+        path_level_db: db(path.levelDb, band),
+        a_weight_db: A_WEIGHTS_DB[bandHz],
+      }),
+    ),
+  );
+}
