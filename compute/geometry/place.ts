@@ -21,3 +21,8 @@ export function along(a: Place, b: Place, t: number): Place {
 export function side(a: Place, b: Place, c: Place): number {
   return (b.xM - a.xM) * (c.yM - a.yM) - (b.yM - a.yM) * (c.xM - a.xM);
 }
+
+/** Length of a line through its points [m]. */
+export function lineLengthM(line: readonly Place[]): number {
+  return line.slice(1).reduce((sum, to, index) => sum + planDistanceM(line[index] as Place, to), 0);
+}

@@ -32,7 +32,15 @@ export interface PeriodActivity {
   /** Hours inside the period. */
   readonly windowH: number;
   /** Items that count, each with the share of the period (or of its worst stretch) in which it runs, above 0 to 1. */
-  readonly shares: readonly { readonly item: string; readonly share: number }[];
+  readonly shares: readonly ItemShare[];
+}
+
+/** Part of one item in a period level. */
+export interface ItemShare {
+  readonly item: string;
+  readonly share: number;
+  /** Its level over the period, free field [dB(A)]. */
+  readonly levelDba: number;
 }
 
 interface DayWork {
@@ -108,22 +116,15 @@ function wholePeriod(
   const periodH = hoursOf(rule.period);
   const activities = day.work.map(({ activity, stretches }) => {
     const windowH = lengthH(stretches);
-    const share = ({ onTimePct }: { readonly onTimePct: number }) => (onTimePct / 100) * (windowH / periodH);
-    return { id: activity.id, windowH, shares: activity.items.map((item) => ({ item: item.id, share: share(item) })) };
+    const shares = assessment.itemLevels(activity.id, pointId).map(({ item, levelDba }) => {
+      const { onTimePct } = item;
+      const here = working.at(`activity:${activity.id}`, `item:${item.id}`);
+      const level = here.work(periodLevelEquation, { levelDb: levelDba, onTimePct, windowH, periodH }, "period-share");
+      return { item: item.id, share: (onTimePct / 100) * (windowH / periodH), levelDba: level };
+    });
+    return { id: activity.id, windowH, shares };
   });
-  const levelsDb = activities.flatMap(({ id, windowH }) =>
-    assessment
-      .itemLevels(id, pointId)
-      .map(({ item, levelDba }) =>
-        working
-          .at(`activity:${id}`, `item:${item.id}`)
-          .work(
-            periodLevelEquation,
-            { levelDb: levelDba, onTimePct: item.onTimePct, windowH, periodH },
-            "period-share",
-          ),
-      ),
-  );
+  const levelsDb = activities.flatMap(({ shares }) => shares.map(({ levelDba }) => levelDba));
   return { levelDba: working.work(sumLevels, { levelsDb }, "period-level"), activities };
 }
 
@@ -177,14 +178,14 @@ function activityWorst(
     { levelsDb: counted.map((item) => item.levelDba) },
     "worst-stretch-activity",
   );
-  return { levelDba, shares: counted.map(({ item, share }) => ({ item, share })) };
+  return { levelDba, shares: counted };
 }
 
 function isLoudest(item: { readonly levelDba: number }, items: readonly { readonly levelDba: number }[]): boolean {
   return items.every((other) => other.levelDba <= item.levelDba);
 }
 
-function itemWorst(working: Working, { item, levelDba }: ItemLevel, averagingMin: number) {
+function itemWorst(working: Working, { item, levelDba }: ItemLevel, averagingMin: number): ItemShare {
   const here = working.at(`item:${item.id}`);
   const share = item.run
     ? here.work(worstShare, { onTimePct: item.onTimePct, ...item.run, averagingMin }, "worst-share")

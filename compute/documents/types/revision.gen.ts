@@ -358,6 +358,10 @@ export interface SealedPeriodShare {
    * Share of the period, or of its worst stretch, in which it runs.
    */
   share: number;
+  /**
+   * Its level over the period, free field.
+   */
+  levelDba: number;
 }
 /**
  * Parts the level of one item at one receptor point is made of, while running, free field, all adopted controls.
