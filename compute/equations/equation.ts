@@ -87,9 +87,8 @@ function checkInputs(
 
 function checkList(name: string, input: ManyInput, given: unknown, inputs: Readonly<Record<string, unknown>>): void {
   if (!Array.isArray(given) || given.length === 0) throw new InputError(name, given, "a list of at least one number");
-  given.forEach((value, index) => {
-    checkNumber(`${name}[${index}]`, input, value);
-  });
+  const wrong = given.findIndex((value) => !isAccepted(input, value));
+  if (wrong >= 0) checkNumber(`${name}[${wrong}]`, input, given[wrong]);
   const other = input.sameLengthAs === undefined ? undefined : inputs[input.sameLengthAs];
   if (Array.isArray(other) && other.length !== given.length) {
     throw new InputError(name, given.length, `as many values as ${input.sameLengthAs} has (${other.length})`);
@@ -97,12 +96,13 @@ function checkList(name: string, input: ManyInput, given: unknown, inputs: Reado
 }
 
 function checkNumber(name: string, input: InputSpec, given: unknown): void {
-  const tooLow = (value: number) => (input.aboveMin ? value <= input.min : value < input.min);
-  if (typeof given !== "number" || !Number.isFinite(given) || tooLow(given) || given > input.max) {
-    throw new InputError(name, given, rangeText(input));
-  }
-  if (input.oneOf && !input.oneOf.includes(given))
-    throw new InputError(name, given, `one of ${input.oneOf.join(", ")} ${input.unit}`);
+  if (!isAccepted(input, given)) throw new InputError(name, given, rangeText(input));
+}
+
+function isAccepted(input: InputSpec, given: unknown): boolean {
+  if (typeof given !== "number" || !Number.isFinite(given) || given > input.max) return false;
+  const highEnough = input.aboveMin ? given > input.min : given >= input.min;
+  return highEnough && (!input.oneOf || input.oneOf.includes(given));
 }
 
 /** The accepted range in words, e.g. `a number from 0 to 140 dB`. */

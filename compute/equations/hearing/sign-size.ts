@@ -9,7 +9,7 @@ export const signSize = equation({
   inputs: { viewingDistanceM: { kind: "one", symbol: "E", unit: "m", min: 0, aboveMin: true, max: 30 } },
   source: {
     document: "BGV A8",
-    edition: "2002",
+    edition: "edition not noted",
     clause: "4.9, Z = 40; ASR A1.3, table of sign sizes",
     checked: "read",
   },
