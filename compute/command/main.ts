@@ -1,6 +1,9 @@
 import { RecordError } from "../record/issued-revisions.ts";
 import type { Command, Outcome, Place } from "./command.ts";
 import { commands } from "./commands.ts";
+import { OutputError } from "./fresh-folder.ts";
+
+export { strict } from "../../templates/models/strict.ts";
 
 /** Runs one command and prints what it leaves; the exit status comes back. */
 export async function run(args: readonly string[], place: Place): Promise<number> {
@@ -15,8 +18,9 @@ async function outcome(command: Command, args: readonly string[], place: Place):
   try {
     return await command.run(args, place);
   } catch (error) {
-    // A sealed file that cannot be trusted is for the user to mend; anything else is our own fault and keeps its trace.
-    if (error instanceof RecordError) return { code: 1, out: "", err: `${error.message}\n` };
+    // A sealed file or an output folder is for the user to mend; anything else is our own fault and keeps its trace.
+    if (error instanceof RecordError || error instanceof OutputError)
+      return { code: 1, out: "", err: `${error.message}\n` };
     throw error;
   }
 }

@@ -24,6 +24,9 @@ export function listText(words: Words, items: readonly string[]): string {
 }
 
 /** Clock times on days: `Monday to Friday, 08:00 to 17:30`. */
-export function windowText(words: Words, window: { readonly days: readonly string[]; readonly from: string; readonly to: string }): string {
+export function windowText(
+  words: Words,
+  window: { readonly days: readonly string[]; readonly from: string; readonly to: string },
+): string {
   return words.say("dates.window", { days: daysText(words, window.days), from: window.from, to: window.to });
 }

@@ -1,7 +1,7 @@
 import type { Source } from "../../compute/documents/types/common.gen.ts";
-import type { Words } from "./words.ts";
 import { hrefTo } from "./page.ts";
 import type { RevisionView } from "./revision-view.ts";
+import type { Words } from "./words.ts";
 
 /** Where a number in a document is known from, in words. */
 export function sourceText(words: Words, source: Source): string {
@@ -15,11 +15,21 @@ export function documentRows(view: RevisionView, file: string) {
   const sheets = (["plant", "panels", "linings", "silencers"] as const).flatMap((kind) =>
     Object.entries(inputs[kind]).map(([id, sheet]) => {
       const source: Source = "emission" in sheet ? sheet.emission.source : sheet.source;
-      return row(view, text(sheet.name), words.say(`sources.${kind}`), hrefTo(file, `data-sheets/${kind}/${id}/index.html`), source);
+      return row(
+        view,
+        text(sheet.name),
+        words.say(`sources.${kind}`),
+        hrefTo(file, `data-sheets/${kind}/${id}/index.html`),
+        source,
+      );
     }),
   );
   const limits = Object.entries(inputs.limits).flatMap(([id, set]) =>
-    set.rules.slice(0, 1).map((rule) => row(view, text(set.title), words.say("sources.limits"), hrefTo(file, `limits/${id}/index.html`), rule.source)),
+    set.rules
+      .slice(0, 1)
+      .map((rule) =>
+        row(view, text(set.title), words.say("sources.limits"), hrefTo(file, `limits/${id}/index.html`), rule.source),
+      ),
   );
   const duties = Object.entries(inputs.duties).map(([id, set]) =>
     row(view, text(set.title), words.say("sources.duties"), hrefTo(file, `duties/${id}/index.html`), set.source),
@@ -28,5 +38,11 @@ export function documentRows(view: RevisionView, file: string) {
 }
 
 function row(view: RevisionView, name: string, kind: string, href: string, source: Source) {
-  return { name, kind, href, source: sourceText(view.words, source), checked: view.words.say(`checked.${source.checked}`) };
+  return {
+    name,
+    kind,
+    href,
+    source: sourceText(view.words, source),
+    checked: view.words.say(`checked.${source.checked}`),
+  };
 }

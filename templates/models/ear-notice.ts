@@ -1,3 +1,4 @@
+import type { SealedReason } from "../../compute/documents/types/revision.gen.ts";
 import { tenthDb, zoneMetres } from "../../compute/figures/display.ts";
 import { listText } from "./dates.ts";
 import { hrefTo } from "./page.ts";
@@ -16,7 +17,14 @@ export type EarNotice =
       readonly href: string;
       readonly more: string;
     }
-  | { readonly kind: "information"; readonly title: string; readonly lead: string; readonly reason: string; readonly href: string; readonly more: string }
+  | {
+      readonly kind: "information";
+      readonly title: string;
+      readonly lead: string;
+      readonly reason: string;
+      readonly href: string;
+      readonly more: string;
+    }
   | { readonly kind: "none"; readonly reason: string };
 
 /** The notice of a revision as its pages carry it; nothing but the sealed rule's result decides. */
@@ -30,13 +38,21 @@ export function earNotice(view: RevisionView, file: string): EarNotice {
         kind: "mandatory",
         title: words.say("notice.mandatory-title"),
         sign: words.say("notice.sign"),
-        lead: words.say(notice.by === "law" ? "notice.mandatory-lead" : "notice.good-practice-lead", { zone: zoneTerm(view) }),
+        lead: words.say(notice.by === "law" ? "notice.mandatory-lead" : "notice.good-practice-lead", {
+          zone: zoneTerm(view),
+        }),
         where: whereText(view),
         reason: reasonText(view),
         ...link,
       };
     case "information":
-      return { kind: "information", title: words.say("notice.information-title"), lead: words.say("notice.information-lead"), reason: reasonText(view), ...link };
+      return {
+        kind: "information",
+        title: words.say("notice.information-title"),
+        lead: words.say("notice.information-lead"),
+        reason: reasonText(view),
+        ...link,
+      };
     case "none":
       return { kind: "none", reason: words.say("notice.none-reason") };
   }
@@ -74,21 +90,22 @@ function activityTitle(view: RevisionView, id: string): string {
   return view.text(activity.title);
 }
 
-/** Why the notice stands: the loudest place, or the peak that nobody has measured. */
+/** Why the notice stands: loud places, and peaks that nobody has measured. */
 export function reasonText(view: RevisionView): string {
   const { notice } = view.revision.earProtection;
   if (notice.kind === "none") return view.words.say("notice.none-reason");
-  const texts = notice.reasons.map((reason) => {
-    const name = view.text(itemOf(view, reason.machine).name);
-    switch (reason.kind) {
-      case "beside":
-      case "work-station":
-        return view.words.say(`notice.reason-${reason.kind}`, { name, level: tenthDb(reason.levelDba) });
-      case "peak":
-        return view.words.say("notice.reason-peak", { name, level: tenthDb(reason.levelDbc) });
-      case "peak-not-known":
-        return view.words.say("notice.reason-peak-not-known", { name });
-    }
-  });
-  return texts.join(" ");
+  return notice.reasons.map((reason) => reasonSentence(view, reason)).join(" ");
+}
+
+function reasonSentence(view: RevisionView, reason: SealedReason): string {
+  const name = view.text(itemOf(view, reason.machine).name);
+  switch (reason.kind) {
+    case "beside":
+    case "work-station":
+      return view.words.say(`notice.reason-${reason.kind}`, { name, level: tenthDb(reason.levelDba) });
+    case "peak":
+      return view.words.say("notice.reason-peak", { name, level: tenthDb(reason.levelDbc) });
+    case "peak-not-known":
+      return view.words.say("notice.reason-peak-not-known", { name });
+  }
 }

@@ -42,7 +42,10 @@ export function earProtectionPage(view: RevisionView): Page {
         ["ask", text(earProtection.askRole)],
         ["emergency", text(earProtection.emergencySignal)],
         ["until", words.say("ear.until", { date: dateText(words, statement.until) })],
-        ["duty", words.say("ear.duty", { title: text(set.title), edition: set.edition, date: dateText(words, set.checkedOn) })],
+        [
+          "duty",
+          words.say("ear.duty", { title: text(set.title), edition: set.edition, date: dateText(words, set.checkedOn) }),
+        ],
       ].map(([key = "", value = ""]) => ({ label: words.say(`ear.${key}-label`), value })),
       cautions: Object.values(words.section("ear-cautions")),
     },

@@ -1,5 +1,5 @@
-import { levelBesideLimit, standing, tenthDb, wholeDb } from "../../compute/figures/display.ts";
 import type { SealedPeriod } from "../../compute/documents/types/revision.gen.ts";
+import { levelBesideLimit, standing, tenthDb, wholeDb } from "../../compute/figures/display.ts";
 import { dayOf } from "../../compute/programme/dates.ts";
 import { dateText, daysText, windowText } from "./dates.ts";
 import type { RevisionView } from "./revision-view.ts";

@@ -12,7 +12,13 @@ export interface Typesetter {
 const STYLE = / style="([^"]*)"/g;
 
 function typeset(tex: string, displayMode: boolean): string {
-  const html = katex.renderToString(tex, { output: "htmlAndMathml", displayMode, throwOnError: true, strict: "error", trust: false });
+  const html = katex.renderToString(tex, {
+    output: "htmlAndMathml",
+    displayMode,
+    throwOnError: true,
+    strict: "error",
+    trust: false,
+  });
   if (html.includes("#cc0000")) throw new Error(`the equation does not typeset: ${tex}`);
   return html;
 }
@@ -53,6 +59,8 @@ function withClasses(html: string, classes: ReadonlyMap<string, string>, tex: st
     const name = classes.get(style);
     if (!name) throw new Error(`the equation needs a style that no equation of the registry has (${style}): ${tex}`);
     const bare = tag.replace(/ style="[^"]*"/, "");
-    return / class="/.test(bare) ? bare.replace(/ class="/, ` class="${name} `) : bare.replace(/^<[a-z]+/, (start) => `${start} class="${name}"`);
+    return / class="/.test(bare)
+      ? bare.replace(/ class="/, ` class="${name} `)
+      : bare.replace(/^<[a-z]+/, (start) => `${start} class="${name}"`);
   });
 }

@@ -1,6 +1,5 @@
 import type { Words } from "./words.ts";
 
-
 /** A page as it is handed to a template. */
 export interface Page {
   /** Path of the file in the site, e.g. `saltpan-quay/index.html`. */
@@ -71,4 +70,3 @@ export function headOf({ file, words, title, description, above, invented }: Hea
     foot: words.say("common.foot"),
   };
 }
-

@@ -19,7 +19,12 @@ interface Sheet {
   readonly invented: boolean;
   readonly facts: readonly (readonly [label: string, value: string])[];
   readonly tables: readonly Table[];
-  readonly sources: readonly { readonly of: string; readonly text: string; readonly checked: string; readonly note: string }[];
+  readonly sources: readonly {
+    readonly of: string;
+    readonly text: string;
+    readonly checked: string;
+    readonly note: string;
+  }[];
 }
 
 interface Table {
@@ -34,7 +39,14 @@ function sheetPage(words: Words, { file, title, invented, facts, tables, sources
     file,
     template: "sheet",
     model: {
-      head: headOf({ file, words, title, description: words.say("sheets.description", { title }), above: [], invented }),
+      head: headOf({
+        file,
+        words,
+        title,
+        description: words.say("sheets.description", { title }),
+        above: [],
+        invented,
+      }),
       w: words.section("sheet-page"),
       facts: facts.map(([label, value]) => ({ label, value })),
       tables,
@@ -44,7 +56,12 @@ function sheetPage(words: Words, { file, title, invented, facts, tables, sources
 }
 
 function sourceRow(words: Words, of: string, source: Source) {
-  return { of, text: sourceText(words, source), checked: words.say(`checked.${source.checked}`), note: source.note ?? words.say("sources.no-note") };
+  return {
+    of,
+    text: sourceText(words, source),
+    checked: words.say(`checked.${source.checked}`),
+    note: source.note ?? words.say("sources.no-note"),
+  };
 }
 
 function octaveTable(words: Words, caption: string, label: string, bands: object, places: 1 | 2): Table {
@@ -71,11 +88,29 @@ export function plantPage(words: Words, sheet: Plant): Page {
     invented: sheet.invented,
     facts: [
       ...given.map(({ of, level }) => [of, levelText(words, level)] as const),
-      [words.say("sheets.size"), words.say("sheets.size-value", { length: decimals(sheet.outline.lengthM, 1), width: decimals(sheet.outline.widthM, 1), swing: decimals(sheet.swingM, 1), largest: decimals(sheet.largestDimensionM, 1) })],
+      [
+        words.say("sheets.size"),
+        words.say("sheets.size-value", {
+          length: decimals(sheet.outline.lengthM, 1),
+          width: decimals(sheet.outline.widthM, 1),
+          swing: decimals(sheet.swingM, 1),
+          largest: decimals(sheet.largestDimensionM, 1),
+        }),
+      ],
       [words.say("sheets.centre"), words.say("sheets.metres", { value: decimals(sheet.acousticCentreHeightM, 1) })],
     ],
     tables: given.flatMap(({ of, level }) =>
-      level.kind === "octave" ? [octaveTable(words, words.say("sheets.bands-caption", { of }), words.say("sheets.level-row", { weighting: level.weighting }), level.bandsDb, 1)] : [],
+      level.kind === "octave"
+        ? [
+            octaveTable(
+              words,
+              words.say("sheets.bands-caption", { of }),
+              words.say("sheets.level-row", { weighting: level.weighting }),
+              level.bandsDb,
+              1,
+            ),
+          ]
+        : [],
     ),
     sources: given.map(({ of, level }) => sourceRow(words, of, level.source)),
   });
@@ -87,7 +122,10 @@ function levelText(words: Words, level: Level): string {
     distance: quantity.kind === "pressure-at-distance" ? decimals(quantity.distanceM, 1) : "",
     ground: quantity.kind === "pressure-at-distance" ? words.say(`sheets.ground-${quantity.ground}`) : "",
   });
-  const value = level.kind === "single" ? words.say("sheets.single", { value: decimals(level.valueDb, 1), weighting: level.weighting }) : words.say(`sheets.${level.kind}`);
+  const value =
+    level.kind === "single"
+      ? words.say("sheets.single", { value: decimals(level.valueDb, 1), weighting: level.weighting })
+      : words.say(`sheets.${level.kind}`);
   const character = level.character.impulsive ? "impulsive" : level.character.tonal ? "tonal" : "plain";
   return words.say("sheets.level", {
     value,
@@ -97,7 +135,10 @@ function levelText(words: Words, level: Level): string {
     uncertainty: decimals(level.uncertaintyDb, 1),
     character: words.say(`sheets.character-${character}`),
     k: words.say(level.kIncluded ? "sheets.k-included" : "sheets.k-not-included"),
-    shape: level.kind === "single" && level.shapeFrom ? words.say("sheets.shape", { sheet: level.shapeFrom }) : words.say("sheets.no-shape"),
+    shape:
+      level.kind === "single" && level.shapeFrom
+        ? words.say("sheets.shape", { sheet: level.shapeFrom })
+        : words.say("sheets.no-shape"),
   });
 }
 
@@ -105,17 +146,33 @@ function levelText(words: Words, level: Level): string {
 export function materialPage(
   words: Words,
   kind: "panels" | "linings" | "silencers",
-  sheet: { readonly id: string; readonly invented: boolean; readonly name: Readonly<Record<string, unknown>>; readonly source: Source; readonly assumed63Hz?: Readonly<Record<string, unknown>> },
+  sheet: {
+    readonly id: string;
+    readonly invented: boolean;
+    readonly name: Readonly<Record<string, unknown>>;
+    readonly source: Source;
+    readonly assumed63Hz?: Readonly<Record<string, unknown>>;
+  },
   bands: object,
   facts: readonly (readonly [string, string])[] = [],
 ): Page {
-  const assumed = sheet.assumed63Hz ? [[words.say("sheets.assumed"), textIn(sheet.assumed63Hz, words.language, "en")] as const] : [];
+  const assumed = sheet.assumed63Hz
+    ? [[words.say("sheets.assumed"), textIn(sheet.assumed63Hz, words.language, "en")] as const]
+    : [];
   return sheetPage(words, {
     file: `data-sheets/${kind}/${sheet.id}/index.html`,
     title: textIn(sheet.name, words.language, "en"),
     invented: sheet.invented,
     facts: [...facts, ...assumed],
-    tables: [octaveTable(words, words.say(`sheets.${kind}-caption`), words.say(`sheets.${kind}-row`), bands, kind === "linings" ? 2 : 1)],
+    tables: [
+      octaveTable(
+        words,
+        words.say(`sheets.${kind}-caption`),
+        words.say(`sheets.${kind}-row`),
+        bands,
+        kind === "linings" ? 2 : 1,
+      ),
+    ],
     sources: [sourceRow(words, words.say(`sheets.${kind}-row`), sheet.source)],
   });
 }
@@ -149,7 +206,10 @@ export function limitSetPage(words: Words, set: LimitSet): Page {
               minutes: rule.averaging.kind === "worst" ? rule.averaging.minutes : "",
             }),
             rule.position.kind === "facade"
-              ? words.say("sheets.position-facade", { distance: decimals(rule.position.distanceM, 1), term: decimals(rule.position.termDb, 1) })
+              ? words.say("sheets.position-facade", {
+                  distance: decimals(rule.position.distanceM, 1),
+                  term: decimals(rule.position.termDb, 1),
+                })
               : words.say("sheets.position-free-field"),
           ],
         })),
@@ -165,8 +225,18 @@ export function dutySetPage(words: Words, set: DutySet): Page {
   const valueRow = (name: string, from: DutySet["mandatoryFrom"]) => ({
     label: words.say(`sheets.duty-${name}`),
     cells: [
-      from.levelDba === undefined ? words.say("sheets.none-in-law") : words.say("sheets.duty-level", { comparator: words.say(`sheets.comparator-${from.comparator ?? "at-or-above"}`), value: wholeOrTenth(from.levelDba) }),
-      from.peakDbc === undefined ? words.say("sheets.none-in-law") : words.say("sheets.duty-peak", { comparator: words.say(`sheets.comparator-${from.peakComparator ?? "at-or-above"}`), value: wholeOrTenth(from.peakDbc) }),
+      from.levelDba === undefined
+        ? words.say("sheets.none-in-law")
+        : words.say("sheets.duty-level", {
+            comparator: words.say(`sheets.comparator-${from.comparator ?? "at-or-above"}`),
+            value: wholeOrTenth(from.levelDba),
+          }),
+      from.peakDbc === undefined
+        ? words.say("sheets.none-in-law")
+        : words.say("sheets.duty-peak", {
+            comparator: words.say(`sheets.comparator-${from.peakComparator ?? "at-or-above"}`),
+            value: wholeOrTenth(from.peakDbc),
+          }),
     ],
   });
   return sheetPage(words, {
@@ -177,7 +247,12 @@ export function dutySetPage(words: Words, set: DutySet): Page {
       [words.say("sheets.edition"), set.edition],
       [words.say("sheets.checked-on"), dateText(words, set.checkedOn)],
       [words.say("sheets.zone-term"), own(set.zoneTerm)],
-      [words.say("sheets.exchange"), set.exchange.kind === "equal-energy" ? words.say("sheets.equal-energy") : words.say("sheets.exchange-rate", { rate: decimals(set.exchange.rateDb, 0) })],
+      [
+        words.say("sheets.exchange"),
+        set.exchange.kind === "equal-energy"
+          ? words.say("sheets.equal-energy")
+          : words.say("sheets.exchange-rate", { rate: decimals(set.exchange.rateDb, 0) }),
+      ],
       [words.say("sheets.force"), words.say("sheets.force-value")],
     ],
     tables: [

@@ -1,7 +1,7 @@
-import { decimals, tenthDb, wholeDb } from "../../compute/figures/display.ts";
-import { metricOf } from "../../compute/statement/limit-rules.ts";
 import type { Activity, Control, PlantItem } from "../../compute/documents/types/statement.gen.ts";
+import { decimals, tenthDb, wholeDb } from "../../compute/figures/display.ts";
 import { lineLengthM } from "../../compute/geometry/place.ts";
+import { metricOf } from "../../compute/statement/limit-rules.ts";
 import { dateText, windowText } from "./dates.ts";
 import { earNotice, zoneTerm } from "./ear-notice.ts";
 import type { JudgedLevel } from "./levels.ts";
@@ -26,7 +26,11 @@ export function statementPage(view: RevisionView): Page {
         file,
         words,
         title,
-        description: words.say("statement.description", { phase: text(statement.title), project: text(project.title), town: text(project.town) }),
+        description: words.say("statement.description", {
+          phase: text(statement.title),
+          project: text(project.title),
+          town: text(project.town),
+        }),
         above: [{ text: text(project.title), file: `${project.id}/index.html` }],
         invented: statement.invented,
       }),
@@ -37,7 +41,10 @@ export function statementPage(view: RevisionView): Page {
       work: {
         what: text(statement.what),
         why: text(statement.why),
-        dates: words.say("statement.dates", { from: dateText(words, statement.from), until: dateText(words, statement.until) }),
+        dates: words.say("statement.dates", {
+          from: dateText(words, statement.from),
+          until: dateText(words, statement.until),
+        }),
         hours: project.hours.map((hours) => windowText(words, hours)),
       },
       answers: answers(view),
@@ -100,7 +107,10 @@ function answers(view: RevisionView): readonly { readonly text: string; readonly
     const level = judgedLevel(view, worst);
     const { about, limit, standing, averaging, period } = level;
     const point = pointName(view, worst.point);
-    return { text: view.words.say("statement.answer", { period, averaging, point, about, limit, standing }), over: level.over };
+    return {
+      text: view.words.say("statement.answer", { period, averaging, point, about, limit, standing }),
+      over: level.over,
+    };
   });
 }
 
@@ -126,7 +136,10 @@ function activityPart(view: RevisionView, file: string, activity: Activity) {
     id: activity.id,
     title: text(activity.title),
     what: text(activity.what),
-    dates: words.say("statement.dates", { from: dateText(words, activity.from), until: dateText(words, activity.until) }),
+    dates: words.say("statement.dates", {
+      from: dateText(words, activity.from),
+      until: dateText(words, activity.until),
+    }),
     windows: activity.windows.map((window) => windowText(words, window)),
     outside: activity.outsideHours
       ? { kind: "outside", text: words.say("statement.outside", { reason: text(activity.outsideHours) }) }
@@ -157,7 +170,9 @@ function plantRow(view: RevisionView, file: string, item: PlantItem) {
 }
 
 function controlsPart(view: RevisionView) {
-  const points = view.project.receptors.flatMap((receptor) => receptor.points.map((point) => `${receptor.id}.${point.id}`));
+  const points = view.project.receptors.flatMap((receptor) =>
+    receptor.points.map((point) => `${receptor.id}.${point.id}`),
+  );
   return view.statement.controls.map((control) => ({
     id: control.id,
     name: view.text(control.name),
@@ -206,7 +221,8 @@ function stateText(view: RevisionView, control: Control): string {
 
 /** What a control is worth at each receptor point, at the rule that decides there; nothing for practice and for what is not adopted. */
 function effectPart(view: RevisionView, control: Control, points: readonly string[]) {
-  if (control.state.kind !== "adopted" || control.kind === "practice") return { kind: "none", text: view.words.say("statement.effect-none") };
+  if (control.state.kind !== "adopted" || control.kind === "practice")
+    return { kind: "none", text: view.words.say("statement.effect-none") };
   const quantity = control.kind === "running-time" ? "reduction" : "insertion-loss";
   const rows = points.flatMap((point) => {
     const decides = view.revision.governing.find((each) => each.point === point);
@@ -228,13 +244,18 @@ function ruleFor(view: RevisionView, id: string) {
 
 function edgeText(view: RevisionView): string {
   const { edgeDba, shift } = view.revision.earProtection;
-  return view.words.say("zones.edge", { level: tenthDb(edgeDba), shift: decimals(shift.shiftH, 1), uncertainty: wholeDb(shift.uncertaintyDb) });
+  return view.words.say("zones.edge", {
+    level: tenthDb(edgeDba),
+    shift: decimals(shift.shiftH, 1),
+    uncertainty: wholeDb(shift.uncertaintyDb),
+  });
 }
 
 function vibrationPart(view: RevisionView): readonly string[] {
   const { vibration } = view.statement;
   const { words, text } = view;
-  if (vibration.kind === "not-expected") return [words.say("statement.vibration-not-expected", { why: text(vibration.why) })];
+  if (vibration.kind === "not-expected")
+    return [words.say("statement.vibration-not-expected", { why: text(vibration.why) })];
   return [
     words.say("statement.vibration-documents", { documents: text(vibration.documents) }),
     words.say("statement.vibration-criteria", { criteria: text(vibration.criteria) }),

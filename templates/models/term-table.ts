@@ -23,15 +23,22 @@ export function termTable(view: RevisionView, terms: SealedTerms) {
     rows: [
       row("power", terms.powerDb),
       row("control", terms.controlLossDb),
-      row("divergence", BANDS_HZ.map(() => terms.divergenceDb)),
+      row(
+        "divergence",
+        BANDS_HZ.map(() => terms.divergenceDb),
+      ),
       row("air", terms.airDb),
       row("ground", terms.groundDb),
       ...terms.paths.flatMap((path) => {
         const name = pathName(view, path);
-        const screened = path.path === "direct" ? [] : [row("screen", path.screenDb, name), row("cap", path.capDb, name)];
+        const screened =
+          path.path === "direct" ? [] : [row("screen", path.screenDb, name), row("cap", path.capDb, name)];
         return [...screened, row("level", path.levelDb, name)];
       }),
-      row("weight", BANDS_HZ.map((bandHz) => 1000 * A_WEIGHTS_DB[bandHz])),
+      row(
+        "weight",
+        BANDS_HZ.map((bandHz) => 1000 * A_WEIGHTS_DB[bandHz]),
+      ),
     ],
     total: words.say("workings.table-total", { level: tenthDb(terms.levelDba / 1000) }),
   };

@@ -13,7 +13,10 @@ export function titleBlock(view: RevisionView): readonly { readonly label: strin
     ["phase", text(statement.title)],
     ["client", text(project.client)],
     ["contractor", text(project.contractor)],
-    ["revision", words.say("block.revision-value", { number: revision.number, date: dateText(words, revision.issuedOn) })],
+    [
+      "revision",
+      words.say("block.revision-value", { number: revision.number, date: dateText(words, revision.issuedOn) }),
+    ],
     ["seal", sealSigns(view)],
   ];
   return rows.map(([label, value]) => ({ label: words.say(`block.${label}`), value }));
@@ -35,9 +38,16 @@ export function banner(view: RevisionView): Banner {
     case "superseded":
       return {
         kind: "not-in-force",
-        text: words.say("block.superseded", { number: revision.number, by: standing.by, date: dateText(words, standing.from) }),
+        text: words.say("block.superseded", {
+          number: revision.number,
+          by: standing.by,
+          date: dateText(words, standing.from),
+        }),
       };
     case "not-yet":
-      return { kind: "not-in-force", text: words.say("block.not-yet", { number: revision.number, date: dateText(words, standing.from) }) };
+      return {
+        kind: "not-in-force",
+        text: words.say("block.not-yet", { number: revision.number, date: dateText(words, standing.from) }),
+      };
   }
 }

@@ -1,9 +1,14 @@
 import { BANDS_HZ } from "../../compute/acoustics/bands.ts";
-import type { SealedEquation, SealedGoverning, SealedPeriod, SealedStep } from "../../compute/documents/types/revision.gen.ts";
+import type {
+  SealedEquation,
+  SealedGoverning,
+  SealedPeriod,
+  SealedStep,
+} from "../../compute/documents/types/revision.gen.ts";
 import { numberLine } from "../../compute/equations/tex/number-line.ts";
 import { decimals, tenthDb } from "../../compute/figures/display.ts";
-import { documentRows } from "./documents.ts";
 import { dateText } from "./dates.ts";
+import { documentRows } from "./documents.ts";
 import { earNotice } from "./ear-notice.ts";
 import { equationPart } from "./equation-part.ts";
 import type { Typesetter } from "./math.ts";
@@ -85,7 +90,9 @@ function pointPart(view: RevisionView, pointId: string, typesetter: Typesetter) 
     name: pointName(view, pointId),
     levels: levelsAt(view, pointId),
     sums: revision.periods.filter(({ point }) => point === pointId).map((period) => sumPart(view, period)),
-    governing: decides ? governingPart(view, decides, typesetter) : { kind: "no-work", text: words.say("workings.no-work") },
+    governing: decides
+      ? governingPart(view, decides, typesetter)
+      : { kind: "no-work", text: words.say("workings.no-work") },
     tables: revision.terms.filter(({ point }) => point === pointId).map((terms) => termTable(view, terms)),
   };
 }
@@ -95,7 +102,9 @@ function sumPart(view: RevisionView, period: SealedPeriod) {
   const { words, text, revision } = view;
   const rows = period.activities.flatMap(({ id, windowH, shares }) =>
     shares.map(({ item, share, levelDba }) => {
-      const terms = revision.terms.find((each) => each.activity === id && each.item === item && each.point === period.point);
+      const terms = revision.terms.find(
+        (each) => each.activity === id && each.item === item && each.point === period.point,
+      );
       if (!terms) throw new Error(`${period.key}: there are no terms of ${id}/${item}`);
       return {
         item: text(itemOf(view, item).name),
@@ -109,9 +118,16 @@ function sumPart(view: RevisionView, period: SealedPeriod) {
   );
   const [limitSet = "", rule = ""] = period.rule.split(".");
   return {
-    caption: words.say("workings.sum-caption", { limit: limitSet, rule, date: dateText(words, period.date), hours: decimals(period.periodH, 1) }),
+    caption: words.say("workings.sum-caption", {
+      limit: limitSet,
+      rule,
+      date: dateText(words, period.date),
+      hours: decimals(period.periodH, 1),
+    }),
     rows,
-    facade: words.say(period.facadeDb === 0 ? "workings.no-facade" : "workings.facade", { db: decimals(period.facadeDb, 1) }),
+    facade: words.say(period.facadeDb === 0 ? "workings.no-facade" : "workings.facade", {
+      db: decimals(period.facadeDb, 1),
+    }),
     result: words.say("workings.sum-result", { level: tenthDb(period.levelDba) }),
   };
 }

@@ -1,5 +1,5 @@
-import { tenthDb, zoneMetres } from "../../compute/figures/display.ts";
 import type { SealedCrossing, SealedItemZone } from "../../compute/documents/types/revision.gen.ts";
+import { tenthDb, zoneMetres } from "../../compute/figures/display.ts";
 import { dateText, windowText } from "./dates.ts";
 import type { RevisionView } from "./revision-view.ts";
 import { itemOf } from "./revision-view.ts";
@@ -68,10 +68,15 @@ function answersTo(view: RevisionView, { item, crossings }: SealedItemZone): rea
   return crossings.flatMap((crossing) => {
     const answer = view.statement.zoneAnswers.find(
       ({ plant, crosses }) =>
-        plant === item && crosses.kind === crossing.kind && (crosses.kind === "boundary" || ("id" in crossing && crosses.id === crossing.id)),
+        plant === item &&
+        crosses.kind === crossing.kind &&
+        (crosses.kind === "boundary" || ("id" in crossing && crosses.id === crossing.id)),
     );
     if (!answer) throw new Error(`the zone of "${item}" passes ${crossing.kind} without an answer`);
-    return view.words.say(`zones.answer-${answer.answer.kind}`, { what: crossedName(view, crossing), how: view.text(answer.answer.how) });
+    return view.words.say(`zones.answer-${answer.answer.kind}`, {
+      what: crossedName(view, crossing),
+      how: view.text(answer.answer.how),
+    });
   });
 }
 
@@ -86,7 +91,10 @@ function crossedName(view: RevisionView, crossing: SealedCrossing): string {
 /** An enclosure that the zone counts on must be named as closed wherever the zone is told. */
 function closedEnclosures(view: RevisionView, { item }: SealedItemZone): readonly string[] {
   return view.statement.controls.flatMap((control) =>
-    control.kind === "enclosure" && control.state.kind === "adopted" && control.namedClosedOnNotice && control.appliesTo.includes(item)
+    control.kind === "enclosure" &&
+    control.state.kind === "adopted" &&
+    control.namedClosedOnNotice &&
+    control.appliesTo.includes(item)
       ? [view.words.say("zones.enclosure-closed", { name: view.text(control.name) })]
       : [],
   );

@@ -1,0 +1,150 @@
+import type { LimitSet } from "../../compute/documents/types/limit-set.gen.ts";
+import type { Revision } from "../../compute/documents/types/revision.gen.ts";
+import type { Wording } from "../../compute/documents/types/wording.gen.ts";
+import type { Equation } from "../../compute/equations/equation.ts";
+import { equationIds, equationOf } from "../../compute/equations/registry.ts";
+import { figuresCsv } from "../../compute/figures/figures-csv.ts";
+import { figuresFile } from "../../compute/figures/figures-file.ts";
+import type { IssuedPhase } from "../../compute/record/issued-revisions.ts";
+import { calculationPage } from "./calculation.ts";
+import { earProtectionPage } from "./ear-protection.ts";
+import { homePage } from "./home.ts";
+import { typesetterFor } from "./math.ts";
+import type { Page } from "./page.ts";
+import type { ProjectView } from "./project.ts";
+import { projectPage } from "./project.ts";
+import type { RevisionView, Standing } from "./revision-view.ts";
+import { revisionView } from "./revision-view.ts";
+import { dutySetPage, limitSetPage, materialPage, plantPage } from "./sheets.ts";
+import { statementPage } from "./statement.ts";
+import { textIn, wordsOf } from "./words.ts";
+import { numberTex, workingsPage } from "./workings.ts";
+
+/** Everything a site is made of. */
+export interface Site {
+  readonly pages: readonly Page[];
+  /** Data files beside the pages. */
+  readonly files: readonly { readonly file: string; readonly text: string }[];
+  /** Classes that stand for the inline styles of typeset equations. */
+  readonly equationCss: string;
+}
+
+export interface SiteParts {
+  readonly phases: readonly IssuedPhase[];
+  /** Today's words, for the pages that belong to no revision. */
+  readonly wording: Wording;
+  readonly method: ReadonlyMap<string, string>;
+  /** Date that decides which revision is in force. */
+  readonly asOf: string;
+}
+
+/** The pages and files of a site, from sealed revisions and nothing else but the words and prose of its living pages. */
+export function siteOf({ phases, wording, method, asOf }: SiteParts): Site {
+  const words = wordsOf(wording);
+  const inForce = phases.flatMap((phase) => {
+    const revision = phase.revisions.findLast(({ issuedOn }) => issuedOn <= asOf);
+    return revision
+      ? [
+          {
+            view: revisionView(revision, `${phase.project}/${phase.phase}/`, { kind: "in-force" }),
+            all: phase.revisions,
+          },
+        ]
+      : [];
+  });
+  const forEver = phases.flatMap(({ project, phase, revisions }) =>
+    revisions.map((revision) =>
+      revisionView(revision, `${project}/${phase}/r${revision.number}/`, standingOf(revision, revisions, asOf)),
+    ),
+  );
+  const views = [...inForce.map(({ view }) => view), ...forEver];
+  const projects = projectViews(inForce);
+  const { css, typesetter } = typesetterFor(texes(forEver));
+  return {
+    pages: [
+      homePage(words, projects, asOf),
+      ...projects.map((project) => projectPage(words, project, asOf)),
+      ...views.flatMap((view) => [statementPage(view), workingsPage(view, typesetter), earProtectionPage(view)]),
+      ...sheetPages(
+        words,
+        inForce.map(({ view }) => view),
+      ),
+      calculationPage(words, method, typesetter),
+    ],
+    files: [
+      ...views.flatMap((view) => [
+        { file: `${view.folder}figures.json`, text: `${JSON.stringify(figuresFile(view.revision))}\n` },
+        { file: `${view.folder}figures.csv`, text: figuresCsv(view.revision) },
+      ]),
+      ...forEver.map(({ folder, revision }) => ({
+        file: `${folder}revision.json`,
+        text: `${JSON.stringify(revision)}\n`,
+      })),
+    ],
+    equationCss: css,
+  };
+}
+
+function standingOf(revision: Revision, revisions: readonly Revision[], asOf: string): Standing {
+  if (revision.issuedOn > asOf) return { kind: "not-yet", from: revision.issuedOn };
+  const next = revisions.findLast(({ number, issuedOn }) => number > revision.number && issuedOn <= asOf);
+  return next ? { kind: "superseded", by: next.number, from: next.issuedOn } : { kind: "in-force" };
+}
+
+/** Projects with a revision in force; the newest revision says what the project is. */
+function projectViews(inForce: ProjectView["phases"]): readonly ProjectView[] {
+  const ids = [...new Set(inForce.map(({ view }) => view.project.id))];
+  return ids.map((id) => {
+    const own = inForce.filter(({ view }) => view.project.id === id);
+    const newest = own.reduce((kept, next) =>
+      kept.view.revision.issuedOn >= next.view.revision.issuedOn ? kept : next,
+    );
+    const phases = [...own].sort((a, b) => (a.view.statement.from < b.view.statement.from ? -1 : 1));
+    const { project } = newest.view;
+    const [first = "en"] = project.languages;
+    return { project, text: (text) => textIn(text, newest.view.words.language, first), phases };
+  });
+}
+
+/** Every equation the site may print, with and without numbers, for the sheet of their styles. */
+function* texes(views: readonly RevisionView[]): Iterable<string> {
+  for (const id of equationIds) yield* texesOf(equationOf(id) as Equation);
+  for (const view of views) {
+    for (const equation of view.revision.equations) yield* texesOf(equation);
+    for (const { steps } of view.revision.governing) for (const step of steps) yield numberTex(view, step);
+  }
+}
+
+function* texesOf(equation: {
+  readonly tex: string;
+  readonly inputs: Readonly<Record<string, { readonly symbol: string }>>;
+}): Iterable<string> {
+  yield equation.tex;
+  for (const { symbol } of Object.values(equation.inputs)) yield symbol;
+}
+
+/** Pages of all sheets that revisions in force rest on; of two versions of a sheet the newest revision's stands. */
+function sheetPages(words: ReturnType<typeof wordsOf>, views: readonly RevisionView[]): readonly Page[] {
+  const newestLast = [...views].sort((a, b) => (a.revision.issuedOn < b.revision.issuedOn ? -1 : 1));
+  const all = <T>(pick: (view: RevisionView) => Readonly<Record<string, T>>): readonly T[] =>
+    Object.entries(Object.assign({}, ...newestLast.map(pick)) as Record<string, T>)
+      .sort(([a], [b]) => (a < b ? -1 : 1))
+      .map(([, sheet]) => sheet);
+  return [
+    ...all(({ revision }) => revision.inputs.plant).map((sheet) => plantPage(words, sheet)),
+    ...all(({ revision }) => revision.inputs.panels).map((sheet) =>
+      materialPage(words, "panels", sheet, sheet.reductionIndexDb, [
+        [words.say("sheets.density"), words.say("sheets.density-value", { value: sheet.surfaceDensityKgm2 })],
+        [words.say("sheets.closed"), words.say(sheet.closed ? "sheets.yes" : "sheets.no")],
+      ]),
+    ),
+    ...all(({ revision }) => revision.inputs.linings).map((sheet) =>
+      materialPage(words, "linings", sheet, sheet.absorption),
+    ),
+    ...all(({ revision }) => revision.inputs.silencers).map((sheet) =>
+      materialPage(words, "silencers", sheet, sheet.insertionLossDb),
+    ),
+    ...all<LimitSet>(({ revision }) => revision.inputs.limits).map((set) => limitSetPage(words, set)),
+    ...all(({ revision }) => revision.inputs.duties).map((set) => dutySetPage(words, set)),
+  ];
+}
