@@ -33,6 +33,14 @@ export function distanceToOutlineM(place: Place, outline: readonly Place[]): num
   return Math.min(...sides(outline).map(([a, b]) => distanceToSegmentM(place, a, b)));
 }
 
+/** What floating point leaves of a position that stands on an edge [m]. */
+const ON_EDGE_M = 1e-9;
+
+/** Whether a position lies inside a closed outline or on one of its sides. */
+export function isInsideOrOnEdge(place: Place, outline: readonly Place[]): boolean {
+  return distanceToOutlineM(place, outline) <= ON_EDGE_M;
+}
+
 /** Shares of the way from `a` to `b` at which an outline is crossed, in ascending order. */
 export function outlineCrossings(a: Place, b: Place, outline: readonly Place[]): readonly number[] {
   return sides(outline)

@@ -1,15 +1,8 @@
 import { describe, expect, test } from "vitest";
 import { minutesOfWeek } from "../../compute/documents/calendar/minutes-of-week.ts";
 import { isFictionNumber } from "../../compute/documents/fiction-number.ts";
-import { crossingEdges } from "../../compute/documents/geometry/crossing-edges.ts";
-import { distanceToLine } from "../../compute/documents/geometry/distance-to-line.ts";
-import { isInside } from "../../compute/documents/geometry/is-inside.ts";
 import { isExampleDomain } from "../../compute/documents/is-example-domain.ts";
 import { nearest } from "../../compute/documents/nearest.ts";
-
-const at = (xM: number, yM: number) => ({ xM, yM });
-// [derived] An L of two arms, 2 m wide and 4 m long.
-const CORNER = [at(0, 0), at(4, 0), at(4, 2), at(2, 2), at(2, 4), at(0, 4)];
 
 describe("telephone numbers", () => {
   // [memory] Ofcom, "Telephone numbers for use in TV and radio drama programmes"; ranges also printed in encyclopedias.
@@ -56,39 +49,6 @@ describe("domains", () => {
   );
   test.each(["example.co.uk", "counterexample.com", "latest", "contest.org"])("%s is not", (host) => {
     expect(isExampleDomain(host)).toBe(false);
-  });
-});
-
-describe("shapes on the plane", () => {
-  test("inside, outside and on the edge of an L", () => {
-    expect([at(1, 1), at(3, 1), at(1, 3), at(4, 1), at(2, 3)].map((place) => isInside(place, CORNER))).toEqual([
-      true,
-      true,
-      true,
-      true,
-      true,
-    ]);
-    expect([at(3, 3), at(5, 1), at(-1, 1), at(2.001, 3)].map((place) => isInside(place, CORNER))).toEqual([
-      false,
-      false,
-      false,
-      false,
-    ]);
-  });
-  test("an L does not cross itself, in either direction; an hourglass does", () => {
-    expect(crossingEdges(CORNER)).toBeUndefined();
-    expect(crossingEdges([...CORNER].reverse())).toBeUndefined();
-    expect(crossingEdges([at(0, 0), at(2, 2), at(2, 0), at(0, 2)])).toEqual([0, 2]);
-  });
-  test("a corner that touches another edge counts as crossing, a corner on a straight run does not", () => {
-    expect(crossingEdges([at(0, 0), at(4, 0), at(4, 4), at(2, 0), at(0, 4)])).toEqual([0, 2]);
-    expect(crossingEdges([at(0, 0), at(2, 0), at(4, 0), at(4, 4)])).toBeUndefined();
-  });
-  test("distance to a line of two pieces", () => {
-    // [derived] 3-4-5 triangle beyond the end; 1 m beside the first piece.
-    const line = [at(0, 0), at(10, 0), at(10, 10)];
-    expect(distanceToLine(at(13, 14), line)).toBe(5);
-    expect(distanceToLine(at(5, -1), line)).toBe(1);
   });
 });
 

@@ -1,5 +1,5 @@
+import { crossingEdges } from "../../geometry/crossing-edges.ts";
 import type { Rule } from "../document-set.ts";
-import { crossingEdges } from "../geometry/crossing-edges.ts";
 import type { Mistake } from "../mistake.ts";
 import { mistakeAt } from "../mistake-at.ts";
 import { statementsOf } from "../statements-of.ts";

@@ -1,7 +1,7 @@
+import { distanceToLineM } from "../../geometry/distance-to-line.ts";
+import { isInsideOrOnEdge } from "../../geometry/outline.ts";
 import { standsSpan } from "../calendar/stands-span.ts";
 import type { DocumentSet, Rule } from "../document-set.ts";
-import { distanceToLine } from "../geometry/distance-to-line.ts";
-import { isInside } from "../geometry/is-inside.ts";
 import type { Mistake } from "../mistake.ts";
 import { mistakeAt } from "../mistake-at.ts";
 import { type PlacedItem, plantItems } from "../plant-items.ts";
@@ -31,7 +31,7 @@ function insideBuilding(
   return project.buildings.flatMap((building) => {
     const span = standsSpan(set, projectId, building);
     const stands = span !== undefined && span.from <= activity.from && span.until >= activity.until;
-    if (!stands || centreM > roofM(building, project) || !isInside(item.at, building.outline)) return [];
+    if (!stands || centreM > roofM(building, project) || !isInsideOrOnEdge(item.at, building.outline)) return [];
     const expected = "a place outside the buildings that stand while the activity runs";
     const advice = "Move it, give its groundM if it stands on the roof, or say when the building is taken down.";
     return [mistakeAt(set.texts, file, `${pointer}/at`, expected, `a place inside "${building.id}"`, advice)];
@@ -46,7 +46,7 @@ function roofM(building: Building, project: Project): number {
 function inScreen(set: DocumentSet, { file, statement }: PlacedStatement, { item, pointer }: PlacedItem): Mistake[] {
   return statement.controls.flatMap((control) => {
     if (control.kind !== "screen") return [];
-    const distanceM = distanceToLine(item.at, control.line);
+    const distanceM = distanceToLineM(item.at, control.line);
     if (distanceM > NEAREST_M) return [];
     const received = `${distanceM.toFixed(3)} m from "${control.id}"`;
     return [

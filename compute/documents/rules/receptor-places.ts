@@ -1,6 +1,6 @@
+import { distanceToLineM } from "../../geometry/distance-to-line.ts";
+import { isInsideOrOnEdge } from "../../geometry/outline.ts";
 import type { DocumentSet, Rule } from "../document-set.ts";
-import { distanceToLine } from "../geometry/distance-to-line.ts";
-import { isInside } from "../geometry/is-inside.ts";
 import type { Mistake } from "../mistake.ts";
 import { mistakeAt } from "../mistake-at.ts";
 import { type PlacedStatement, statementsOf } from "../statements-of.ts";
@@ -22,7 +22,7 @@ function insideBuildings(set: DocumentSet, file: string, project: Project): Mist
       const around = project.buildings.find(
         (building) =>
           heightM <= (building.groundM ?? project.groundLevelM) + building.heightM &&
-          isInside(point.at, building.outline),
+          isInsideOrOnEdge(point.at, building.outline),
       );
       if (!around) return [];
       const advice = "Put it in front of the facade, for instance 1 m.";
@@ -45,7 +45,7 @@ function inScreens(set: DocumentSet, { file, statement, project }: PlacedStateme
   return statement.controls.flatMap((control, index) => {
     if (control.kind !== "screen") return [];
     return points.flatMap((point) => {
-      const distanceM = distanceToLine(point.at, control.line);
+      const distanceM = distanceToLineM(point.at, control.line);
       if (distanceM > NEAREST_M) return [];
       const expected = `a line more than ${NEAREST_M} m from every receptor point`;
       const received = `${distanceM.toFixed(3)} m from "${point.id}"`;

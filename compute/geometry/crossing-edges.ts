@@ -1,5 +1,6 @@
-import type { Place } from "../types/common.gen.ts";
-import { distanceToSegment } from "./distance-to-segment.ts";
+import { distanceToSegmentM, sides } from "./outline.ts";
+import type { Place } from "./place.ts";
+import { side } from "./place.ts";
 
 type Edge = readonly [from: Place, to: Place];
 
@@ -8,12 +9,11 @@ const TOUCH_M = 1e-9;
 
 /** The first two edges of a closed outline that cross, touch or run back along each other, numbered by their first corners. */
 export function crossingEdges(outline: readonly Place[]): readonly [number, number] | undefined {
-  const count = outline.length;
-  const edges = outline.map((from, index): Edge => [from, outline[(index + 1) % count] ?? from]);
+  const edges = sides(outline);
   for (const [a, one] of edges.entries()) {
     for (const [b, other] of edges.entries()) {
       if (b <= a) continue;
-      const follow = b === a + 1 ? runsBack(one, other) : b - a === count - 1 ? runsBack(other, one) : undefined;
+      const follow = b === a + 1 ? runsBack(one, other) : b - a === edges.length - 1 ? runsBack(other, one) : undefined;
       if (follow ?? meet(one, other)) return [a, b];
     }
   }
@@ -23,23 +23,18 @@ export function crossingEdges(outline: readonly Place[]): readonly [number, numb
 /** Whether the second of two edges that share a corner goes straight back along the first. */
 function runsBack([start, corner]: Edge, [, end]: Edge): boolean {
   return (
-    turn(start, corner, end) === 0 &&
+    side(start, corner, end) === 0 &&
     (corner.xM - start.xM) * (end.xM - corner.xM) + (corner.yM - start.yM) * (end.yM - corner.yM) < 0
   );
 }
 
 function meet([a, b]: Edge, [c, d]: Edge): boolean {
-  if (turn(a, b, c) * turn(a, b, d) < 0 && turn(c, d, a) * turn(c, d, b) < 0) return true;
+  if (side(a, b, c) * side(a, b, d) < 0 && side(c, d, a) * side(c, d, b) < 0) return true;
   const gaps = [
-    distanceToSegment(a, c, d),
-    distanceToSegment(b, c, d),
-    distanceToSegment(c, a, b),
-    distanceToSegment(d, a, b),
+    distanceToSegmentM(a, c, d),
+    distanceToSegmentM(b, c, d),
+    distanceToSegmentM(c, a, b),
+    distanceToSegmentM(d, a, b),
   ];
   return Math.min(...gaps) <= TOUCH_M;
-}
-
-/** Twice the signed area of a triangle: above 0 where the way turns left [m²]. */
-function turn(a: Place, b: Place, c: Place): number {
-  return (b.xM - a.xM) * (c.yM - a.yM) - (b.yM - a.yM) * (c.xM - a.xM);
 }
