@@ -1,6 +1,5 @@
 import type { SealedReason } from "../../compute/documents/types/revision.gen.ts";
 import { tenthDb, zoneMetres } from "../../compute/figures/display.ts";
-import { listText } from "./dates.ts";
 import { hrefTo } from "./page.ts";
 import type { RevisionView } from "./revision-view.ts";
 import { itemOf } from "./revision-view.ts";
@@ -42,7 +41,7 @@ export function earNotice(view: RevisionView, file: string): EarNotice {
           zone: zoneTerm(view),
         }),
         where: whereText(view),
-        reason: reasonText(view),
+        reason: loudestReason(view),
         ...link,
       };
     case "information":
@@ -50,7 +49,7 @@ export function earNotice(view: RevisionView, file: string): EarNotice {
         kind: "information",
         title: words.say("notice.information-title"),
         lead: words.say("notice.information-lead"),
-        reason: reasonText(view),
+        reason: loudestReason(view),
         ...link,
       };
     case "none":
@@ -81,7 +80,7 @@ function whereText(view: RevisionView): string {
         return [];
     }
   });
-  return view.words.say("notice.where", { list: listText(view.words, parts) });
+  return view.words.say("notice.where", { list: parts.join("; ") });
 }
 
 function activityTitle(view: RevisionView, id: string): string {
@@ -95,6 +94,16 @@ export function reasonText(view: RevisionView): string {
   const { notice } = view.revision.earProtection;
   if (notice.kind === "none") return view.words.say("notice.none-reason");
   return notice.reasons.map((reason) => reasonSentence(view, reason)).join(" ");
+}
+
+/** The strongest reasons only: the loudest place, and a peak that nobody has measured. The notice's own page gives them all. */
+function loudestReason(view: RevisionView): string {
+  const { notice } = view.revision.earProtection;
+  const loudness = (reason: SealedReason) => ("levelDba" in reason ? reason.levelDba : Number.NEGATIVE_INFINITY);
+  const [loudest] = [...notice.reasons].sort((a, b) => loudness(b) - loudness(a));
+  const unknown = notice.reasons.find(({ kind }) => kind === "peak-not-known");
+  const shown = loudest === unknown ? [loudest] : [loudest, unknown];
+  return shown.flatMap((reason) => (reason ? reasonSentence(view, reason) : [])).join(" ");
 }
 
 function reasonSentence(view: RevisionView, reason: SealedReason): string {

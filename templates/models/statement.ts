@@ -1,15 +1,14 @@
-import type { Activity, Control, PlantItem } from "../../compute/documents/types/statement.gen.ts";
+import type { Activity, PlantItem } from "../../compute/documents/types/statement.gen.ts";
 import { decimals, tenthDb, wholeDb } from "../../compute/figures/display.ts";
-import { lineLengthM } from "../../compute/geometry/place.ts";
-import { metricOf } from "../../compute/statement/limit-rules.ts";
-import { dateText, windowText } from "./dates.ts";
+import { controlsPart } from "./controls.ts";
+import { dateText, listText, windowText } from "./dates.ts";
 import { earNotice, zoneTerm } from "./ear-notice.ts";
 import type { JudgedLevel } from "./levels.ts";
 import { judgedLevel } from "./levels.ts";
 import type { Page } from "./page.ts";
 import { headOf, hrefTo } from "./page.ts";
 import type { RevisionView } from "./revision-view.ts";
-import { figureOf, pointName } from "./revision-view.ts";
+import { figureOf, pointName, ruleOf } from "./revision-view.ts";
 import { banner, titleBlock } from "./title-block.ts";
 import { zoneRows } from "./zones.ts";
 
@@ -107,10 +106,9 @@ function answers(view: RevisionView): readonly { readonly text: string; readonly
     const level = judgedLevel(view, worst);
     const { about, limit, standing, averaging, period } = level;
     const point = pointName(view, worst.point);
-    return {
-      text: view.words.say("statement.answer", { period, averaging, point, about, limit, standing }),
-      over: level.over,
-    };
+    const uses = ruleOf(view, rule).rule.uses.map((use) => view.words.say(`uses.${use}`));
+    const parts = { uses: listText(view.words, uses), period, averaging, point, about, limit, standing };
+    return { text: view.words.say("statement.answer", parts), over: level.over };
   });
 }
 
@@ -167,79 +165,6 @@ function plantRow(view: RevisionView, file: string, item: PlantItem) {
         : words.say("statement.run", { run: item.longestRunMin, stop: item.shortestStopMin }),
     checked: words.say(`checked.${sheet.emission.source.checked}`),
   };
-}
-
-function controlsPart(view: RevisionView) {
-  const points = view.project.receptors.flatMap((receptor) =>
-    receptor.points.map((point) => `${receptor.id}.${point.id}`),
-  );
-  return view.statement.controls.map((control) => ({
-    id: control.id,
-    name: view.text(control.name),
-    kind: view.words.say(`statement.control-${control.kind}`),
-    what: controlText(view, control),
-    state: stateText(view, control),
-    by: view.words.say("statement.control-by", {
-      by: view.text(control.by),
-      due: dateText(view.words, control.due),
-      checkedBy: view.text(control.checkedBy),
-    }),
-    effect: effectPart(view, control, points),
-  }));
-}
-
-function controlText(view: RevisionView, control: Control): string {
-  const { words, text } = view;
-  const sheetName = (sheets: Readonly<Record<string, { name: unknown }>>, id: string) =>
-    text((sheets[id]?.name ?? {}) as Readonly<Record<string, unknown>>);
-  switch (control.kind) {
-    case "screen":
-      return words.say("statement.screen-what", {
-        height: decimals(control.heightM, 1),
-        length: decimals(lineLengthM(control.line), 0),
-        panel: sheetName(view.revision.inputs.panels, control.panel),
-      });
-    case "enclosure":
-      return words.say(control.namedClosedOnNotice ? "statement.enclosure-named" : "statement.enclosure-what", {
-        panels: control.faces.map((face) => sheetName(view.revision.inputs.panels, face.panel)).join(", "),
-        deduction: decimals(control.siteBuildDeductionDb, 0),
-      });
-    case "quieter-plant":
-      return words.say("statement.quieter-what", { other: sheetName(view.revision.inputs.plant, control.insteadOf) });
-    case "running-time":
-      return words.say("statement.running-what", { pct: decimals(control.insteadOfPct, 0) });
-    case "practice":
-      return text(control.measure);
-  }
-}
-
-function stateText(view: RevisionView, control: Control): string {
-  return control.state.kind === "rejected"
-    ? view.words.say("statement.state-rejected", { reason: view.text(control.state.reason) })
-    : view.words.say(`statement.state-${control.state.kind}`);
-}
-
-/** What a control is worth at each receptor point, at the rule that decides there; nothing for practice and for what is not adopted. */
-function effectPart(view: RevisionView, control: Control, points: readonly string[]) {
-  if (control.state.kind !== "adopted" || control.kind === "practice")
-    return { kind: "none", text: view.words.say("statement.effect-none") };
-  const quantity = control.kind === "running-time" ? "reduction" : "insertion-loss";
-  const rows = points.flatMap((point) => {
-    const decides = view.revision.governing.find((each) => each.point === point);
-    if (!decides) return [];
-    const { rule } = ruleFor(view, decides.rule);
-    const key = [quantity, metricOf(rule), point, decides.rule, "phase", control.id].join("/");
-    const found = view.revision.figures.find((figure) => figure.key === key);
-    return found ? [{ key, point: pointName(view, point), db: tenthDb(found.value) }] : [];
-  });
-  return { kind: "worth", caption: view.words.say(`statement.effect-${quantity}`), rows };
-}
-
-function ruleFor(view: RevisionView, id: string) {
-  const [set = "", name] = id.split(".");
-  const rule = view.revision.inputs.limits[set]?.rules.find((each) => each.id === name);
-  if (!rule) throw new Error(`the revision has no limit rule "${id}"`);
-  return { rule };
 }
 
 function edgeText(view: RevisionView): string {

@@ -15,7 +15,7 @@ import type { Typesetter } from "./math.ts";
 import type { Page } from "./page.ts";
 import { headOf, hrefTo } from "./page.ts";
 import type { RevisionView } from "./revision-view.ts";
-import { controlOf, itemOf, pointName } from "./revision-view.ts";
+import { controlOf, itemOf, pointName, ruleOf } from "./revision-view.ts";
 import { levelsAt } from "./statement.ts";
 import { termTable } from "./term-table.ts";
 import { banner, titleBlock } from "./title-block.ts";
@@ -116,13 +116,14 @@ function sumPart(view: RevisionView, period: SealedPeriod) {
       };
     }),
   );
-  const [limitSet = "", rule = ""] = period.rule.split(".");
+  const { set, rule } = ruleOf(view, period.rule);
   return {
-    caption: words.say("workings.sum-caption", {
-      limit: limitSet,
-      rule,
+    caption: words.say(rule.averaging.kind === "worst" ? "workings.sum-caption-worst" : "workings.sum-caption", {
+      period: text(rule.period.name),
+      limit: text(set.title),
       date: dateText(words, period.date),
       hours: decimals(period.periodH, 1),
+      minutes: rule.averaging.kind === "worst" ? rule.averaging.minutes : "",
     }),
     rows,
     facade: words.say(period.facadeDb === 0 ? "workings.no-facade" : "workings.facade", {

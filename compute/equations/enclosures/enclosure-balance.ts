@@ -14,7 +14,7 @@ export const enclosureBalance = equation({
     absorptions: { kind: "many", symbol: String.raw`\alpha_i`, unit: "1", min: 0, max: 1, sameLengthAs: "areasM2" },
     reductionIndexesDb: { kind: "many", symbol: "R_i", ...reductionIndex, sameLengthAs: "areasM2" },
   },
-  source: { document: "Stillboard", edition: "1", clause: "power balance of an enclosure", checked: "derived" },
+  source: { document: "Stillboard", edition: "own rule", clause: "power balance of an enclosure", checked: "derived" },
   work: ({ openAreaM2, areasM2, absorptions, reductionIndexesDb }) => {
     let absorbed = 0;
     let passed = 0;

@@ -15,7 +15,7 @@ export const distanceToLevel = equation({
   },
   source: {
     document: "Stillboard",
-    edition: "1",
+    edition: "own rule",
     clause: "point source law, solved for the distance",
     checked: "derived",
   },

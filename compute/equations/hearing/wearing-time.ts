@@ -12,7 +12,7 @@ export const wearingTime = equation({
   },
   source: {
     document: "Stillboard",
-    edition: "1",
+    edition: "own rule",
     clause: "energy at the ear with and without protector",
     checked: "derived",
   },

@@ -13,7 +13,7 @@ export const zoneEdgeLevel = equation({
     shiftH: { kind: "one", symbol: "s", unit: "h", min: 0, aboveMin: true, max: 24 },
     uncertaintyDb: { kind: "one", symbol: "U", unit: "dB", min: 3, max: 20 },
   },
-  source: { document: "Stillboard", edition: "1", clause: "zone rule", checked: "derived" },
+  source: { document: "Stillboard", edition: "own rule", clause: "zone rule", checked: "derived" },
   work: ({ valueDba, exchangeFactorDb, shiftH, uncertaintyDb }) =>
     valueDba - exchangeFactorDb * Math.log10(Math.max(shiftH, 8) / 8) - uncertaintyDb,
 });

@@ -13,7 +13,7 @@ export const zoneLevel = equation({
     distanceM: { kind: "one", symbol: "d", unit: "m", min: 1, max: 10000 },
     walls: { kind: "one", symbol: "n", unit: "1", min: 0, max: 10, decimals: 0 },
   },
-  source: { document: "Stillboard", edition: "1", clause: "zone rule", checked: "derived" },
+  source: { document: "Stillboard", edition: "own rule", clause: "zone rule", checked: "derived" },
   refuse: ({ walls }) =>
     Number.isInteger(walls) ? undefined : new InputError("walls", walls, "a whole number of walls"),
   work: ({ powerDba, distanceM, walls }) => powerDba - 10 * Math.log10(2 * Math.PI * distanceM ** 2) + 3 * walls,

@@ -12,6 +12,6 @@ export const exceedance = equation({
     levelDb: { kind: "one", symbol: "L", ...anyLevel },
     limitDb: { kind: "one", symbol: String.raw`L_{\text{lim}}`, unit: "dB", min: 0, max: 200 },
   },
-  source: { document: "Stillboard", edition: "1", clause: "exceedance", checked: "derived" },
+  source: { document: "Stillboard", edition: "own rule", clause: "exceedance", checked: "derived" },
   work: ({ levelDb, limitDb }) => levelDb - limitDb,
 });

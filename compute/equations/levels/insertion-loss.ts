@@ -12,6 +12,6 @@ export const insertionLoss = equation({
     withoutDb: { kind: "one", symbol: String.raw`L_{\text{without}}`, ...anyLevel },
     withDb: { kind: "one", symbol: String.raw`L_{\text{with}}`, ...anyLevel },
   },
-  source: { document: "Stillboard", edition: "1", clause: "insertion loss", checked: "derived" },
+  source: { document: "Stillboard", edition: "own rule", clause: "insertion loss", checked: "derived" },
   work: ({ withoutDb, withDb }) => withoutDb - withDb,
 });

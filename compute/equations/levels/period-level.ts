@@ -14,7 +14,7 @@ export const periodLevel = equation({
     windowH: { kind: "one", symbol: "h", unit: "h", min: 0, aboveMin: true, max: 168 },
     periodH: { kind: "one", symbol: "H", unit: "h", min: 0, aboveMin: true, max: 168 },
   },
-  source: { document: "Stillboard", edition: "1", clause: "on-time and averaging", checked: "derived" },
+  source: { document: "Stillboard", edition: "own rule", clause: "on-time and averaging", checked: "derived" },
   refuse: ({ windowH, periodH }) =>
     windowH <= periodH
       ? undefined

@@ -13,6 +13,6 @@ export const shapeShift = equation({
     shapeTotalDba: { kind: "one", symbol: String.raw`L_{\text{A},S}`, ...anyLevel },
     levelDba: { kind: "one", symbol: String.raw`L_{\text{A}}`, ...anyLevel },
   },
-  source: { document: "Stillboard", edition: "1", clause: "octave shape rule", checked: "derived" },
+  source: { document: "Stillboard", edition: "own rule", clause: "octave shape rule", checked: "derived" },
   work: ({ shapeDb, shapeTotalDba, levelDba }) => shapeDb + (levelDba - shapeTotalDba),
 });

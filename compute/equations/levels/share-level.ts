@@ -11,6 +11,6 @@ export const shareLevel = equation({
     levelDb: { kind: "one", symbol: "L", ...anyLevel },
     share: { kind: "one", symbol: "s", unit: "1", min: 0, aboveMin: true, max: 1, decimals: 3 },
   },
-  source: { document: "Stillboard", edition: "1", clause: "on-time and averaging", checked: "derived" },
+  source: { document: "Stillboard", edition: "own rule", clause: "on-time and averaging", checked: "derived" },
   work: ({ levelDb, share }) => levelDb + 10 * Math.log10(share),
 });

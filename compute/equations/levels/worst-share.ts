@@ -16,7 +16,7 @@ n &= \left\lfloor \frac{T}{r + p} \right\rfloor
     shortestStopMin: { kind: "one", symbol: "p", unit: "min", min: 0, max: 1440 },
     averagingMin: { kind: "one", symbol: "T", unit: "min", min: 0, aboveMin: true, max: 60 },
   },
-  source: { document: "Stillboard", edition: "1", clause: "on-time and averaging", checked: "derived" },
+  source: { document: "Stillboard", edition: "own rule", clause: "on-time and averaging", checked: "derived" },
   work: ({ onTimePct, longestRunMin: r, shortestStopMin: p, averagingMin: T }) => {
     const n = Math.floor(T / (r + p));
     return Math.max(onTimePct / 100, Math.min(1, (n * r + Math.min(r, T - n * (r + p))) / T));

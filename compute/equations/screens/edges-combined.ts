@@ -9,7 +9,7 @@ export const edgesCombined = equation({
   inputs: { lossesDb: { kind: "many", symbol: "D_i", unit: "dB", min: 0, max: 99 } },
   source: {
     document: "Stillboard",
-    edition: "1",
+    edition: "own rule",
     clause: "energies round the edges of a screen added",
     checked: "derived",
   },

@@ -13,7 +13,7 @@ export const throughAndOver = equation({
   },
   source: {
     document: "Stillboard",
-    edition: "1",
+    edition: "own rule",
     clause: "energies over and through a screen added",
     checked: "derived",
   },
