@@ -31,7 +31,7 @@ const CLOSED_INDEX_DB = 99;
  * @throws {InputError} if an area or index lies outside the equations' range
  */
 export function enclosureInsertionLoss(working: Working, enclosure: Enclosure): Bands {
-  return perBand((bandHz) => bandLoss(working.at(`${bandHz}`), enclosure, bandHz));
+  return perBand((bandHz) => bandLoss(working.at(`band:${bandHz}`), enclosure, bandHz));
 }
 
 function bandLoss(working: Working, enclosure: Enclosure, bandHz: BandHz): number {
@@ -67,11 +67,7 @@ function bandLoss(working: Working, enclosure: Enclosure, bandHz: BandHz): numbe
     {
       openAreaM2: 0,
       areasM2: [...shellM2, floor.areaM2],
-      absorptions: [
-        ...faces.map(() => Math.min(faceAbsorption, 0.95)),
-        ...openings.map(() => 0),
-        Math.min(floor.absorption[bandHz], 0.95),
-      ],
+      absorptions: [...faces.map(() => faceAbsorption), ...openings.map(() => 0), floor.absorption[bandHz]],
       reductionIndexesDb: [...faceIndexDb, ...openingIndexDb, CLOSED_INDEX_DB],
     },
     "enclosure-by-balance",

@@ -67,10 +67,16 @@ export function propagate(working: Working, site: Site, source: PointSource, rec
     groundDb: groundDb(working, factors, planM, source, receptor),
   };
   const past = governingScreen(site, source, receptor, distanceM);
-  const direct = pathTerms(past ? working.at("unscreened") : working.at("direct"), site, source, shared, undefined);
+  const direct = pathTerms(
+    past ? working.at("path:unscreened") : working.at("path:direct"),
+    site,
+    source,
+    shared,
+    undefined,
+  );
   if (!past) return { distanceM, planM, groundFactors: factors, paths: [direct] };
   const beside = [past.over, ...past.around].map((path) =>
-    pathTerms(working.at(path.kind), site, source, shared, { path, extentM: past.extentM }),
+    pathTerms(working.at(`path:${path.kind}`), site, source, shared, { path, extentM: past.extentM }),
   );
   return { distanceM, planM, groundFactors: factors, paths: neverAbove(working, direct, beside) };
 }
@@ -84,7 +90,7 @@ interface Shared {
 
 function airDb(working: Working, site: Site, distanceM: number): Bands {
   return perBand((bandHz) => {
-    const here = working.at(`${bandHz}`);
+    const here = working.at(`band:${bandHz}`);
     const absorptionDbKm = here.work(
       airAbsorption,
       { frequencyHz: exactMidbandHz(bandHz), ...site.air },
@@ -96,7 +102,7 @@ function airDb(working: Working, site: Site, distanceM: number): Bands {
 
 function groundDb(working: Working, factors: GroundFactors, planM: number, source: Point, receptor: Point): Bands {
   return perBand((bandHz) =>
-    working.at(`${bandHz}`).work(
+    working.at(`band:${bandHz}`).work(
       groundEffect,
       {
         bandHz,
@@ -137,7 +143,7 @@ function pathTerms(
     if (past.path.kind !== "over") return loss.lossDb[bandHz];
     const overTop = site.screenOverHardGround === "literal" ? screenOverTopLiteral : screenOverTop;
     return working
-      .at(`${bandHz}`)
+      .at(`band:${bandHz}`)
       .work(overTop, { diffractionDb: loss.lossDb[bandHz], groundDb: shared.groundDb[bandHz] }, "screen");
   });
   return {
@@ -150,7 +156,7 @@ function pathTerms(
     screenDb,
     capDb: perBand(() => 0),
     levelDb: perBand((bandHz) =>
-      working.at(`${bandHz}`).work(
+      working.at(`band:${bandHz}`).work(
         octaveLevel,
         {
           powerDb: source.powerDb[bandHz],
@@ -171,7 +177,7 @@ function pathTerms(
 function neverAbove(working: Working, direct: PathTerms, paths: readonly PathTerms[]): readonly PathTerms[] {
   return paths.map((path) => {
     const limited = (bandHz: (typeof BANDS_HZ)[number]) =>
-      working.at(path.path, `${bandHz}`).work(
+      working.at(`path:${path.path}`, `band:${bandHz}`).work(
         unscreenedLimit,
         {
           levelDb: path.levelDb[bandHz],

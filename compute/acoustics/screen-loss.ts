@@ -42,7 +42,7 @@ export function screenLoss(working: Working, path: ScreenPath, distanceM: number
       : 1;
   const capDb = betweenEdgesM > 0 ? CAP_DB.double : CAP_DB.single;
   const loss = (bandHz: BandHz) => {
-    const here = working.at(`${bandHz}`);
+    const here = working.at(`band:${bandHz}`);
     const edgeFactor = here.work(doubleEdgeFactor, { bandHz, betweenEdgesM }, "edge-factor");
     return here.work(
       screenAttenuation,

@@ -32,7 +32,7 @@ export function soundPower(working: Working, emission: Emission): Bands {
   if (quantity.kind === "sound-power") return bandsDb;
   return perBand((bandHz) =>
     working
-      .at(`${bandHz}`)
+      .at(`band:${bandHz}`)
       .work(
         powerOfPressure,
         { levelDb: bandsDb[bandHz], distanceM: quantity.distanceM, directivityFactor: quantity.directivityFactor },
@@ -47,7 +47,7 @@ function unweighted(working: Working, level: Emission["level"]): Bands {
       return perBand((bandHz) => level.bandsDb[bandHz] - weightDb(level.weighting, bandHz));
     case "third-octave":
       return perBand((bandHz) =>
-        working.at(`${bandHz}`).work(sumLevels, { levelsDb: level.thirdsDb[bandHz] }, "octave-of-thirds"),
+        working.at(`band:${bandHz}`).work(sumLevels, { levelsDb: level.thirdsDb[bandHz] }, "octave-of-thirds"),
       );
     case "single":
       return shaped(working, level.valueDba, level.shapeDb);
@@ -66,7 +66,7 @@ function shaped(working: Working, valueDba: number, shapeDb: Bands): Bands {
   );
   return perBand((bandHz) =>
     working
-      .at(`${bandHz}`)
+      .at(`band:${bandHz}`)
       .work(shapeShift, { shapeDb: shapeDb[bandHz], shapeTotalDba, levelDba: valueDba }, "borrowed-shape"),
   );
 }
