@@ -27,27 +27,32 @@ function className(style: string): string {
   return `k${createHash("sha256").update(style).digest("hex").slice(0, 7)}`;
 }
 
+/** An equation that a site prints: on a line of its own, or a symbol inside a line of text. */
+export interface Printed {
+  readonly tex: string;
+  readonly isDisplay: boolean;
+}
+
 /**
  * The style sheet of all equations that a site prints, and the typesetter that goes with it.
  *
- * @param texes  every equation the site may print, in symbols and with numbers in
+ * @param printed  every equation the site may print, in symbols and with numbers in
  */
-export function typesetterFor(texes: Iterable<string>): { readonly css: string; readonly typesetter: Typesetter } {
+export function typesetterFor(printed: Iterable<Printed>): { readonly css: string; readonly typesetter: Typesetter } {
+  const typesets = new Map<string, string>();
+  const htmlOf = (tex: string, isDisplay: boolean) => {
+    const key = `${isDisplay} ${tex}`;
+    const html = typesets.get(key) ?? typeset(tex, isDisplay);
+    typesets.set(key, html);
+    return html;
+  };
   const classes = new Map<string, string>();
-  for (const tex of texes) {
-    for (const displayMode of [true, false]) {
-      for (const [, style = ""] of typeset(tex, displayMode).matchAll(STYLE)) classes.set(style, className(style));
-    }
+  for (const { tex, isDisplay } of printed) {
+    for (const [, style = ""] of htmlOf(tex, isDisplay).matchAll(STYLE)) classes.set(style, className(style));
   }
   const sorted = [...classes].sort(([a], [b]) => (a < b ? -1 : 1));
   const css = sorted.map(([style, name]) => `.katex .${name}.${name}.${name}{${style}}\n`).join("");
-  const known = new Map<string, string>();
-  const render = (tex: string, displayMode: boolean) => {
-    const key = `${displayMode} ${tex}`;
-    const html = known.get(key) ?? withClasses(typeset(tex, displayMode), classes, tex);
-    known.set(key, html);
-    return html;
-  };
+  const render = (tex: string, isDisplay: boolean) => withClasses(htmlOf(tex, isDisplay), classes, tex);
   return { css, typesetter: { display: (tex) => render(tex, true), inline: (tex) => render(tex, false) } };
 }
 

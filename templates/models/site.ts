@@ -9,6 +9,7 @@ import type { IssuedPhase } from "../../compute/record/issued-revisions.ts";
 import { calculationPage } from "./calculation.ts";
 import { earProtectionPage } from "./ear-protection.ts";
 import { homePage } from "./home.ts";
+import type { Printed } from "./math.ts";
 import { typesetterFor } from "./math.ts";
 import type { Page } from "./page.ts";
 import type { ProjectView } from "./project.ts";
@@ -59,7 +60,7 @@ export function siteOf({ phases, wording, method, asOf }: SiteParts): Site {
   );
   const views = [...inForce.map(({ view }) => view), ...forEver];
   const projects = projectViews(inForce);
-  const { css, typesetter } = typesetterFor(texes(forEver));
+  const { css, typesetter } = typesetterFor(printedBy(forEver));
   return {
     pages: [
       homePage(words, projects, asOf),
@@ -107,20 +108,22 @@ function projectViews(inForce: ProjectView["phases"]): readonly ProjectView[] {
 }
 
 /** Every equation the site may print, with and without numbers, for the sheet of their styles. */
-function* texes(views: readonly RevisionView[]): Iterable<string> {
-  for (const id of equationIds) yield* texesOf(equationOf(id) as Equation);
+function* printedBy(views: readonly RevisionView[]): Iterable<Printed> {
+  for (const id of equationIds) yield* printedOf(equationOf(id) as Equation);
   for (const view of views) {
-    for (const equation of view.revision.equations) yield* texesOf(equation);
-    for (const { steps } of view.revision.governing) for (const step of steps) yield numberTex(view, step);
+    for (const equation of view.revision.equations) yield* printedOf(equation);
+    for (const { steps } of view.revision.governing) {
+      for (const step of steps) yield { tex: numberTex(view, step), isDisplay: true };
+    }
   }
 }
 
-function* texesOf(equation: {
+function* printedOf(equation: {
   readonly tex: string;
   readonly inputs: Readonly<Record<string, { readonly symbol: string }>>;
-}): Iterable<string> {
-  yield equation.tex;
-  for (const { symbol } of Object.values(equation.inputs)) yield symbol;
+}): Iterable<Printed> {
+  yield { tex: equation.tex, isDisplay: true };
+  for (const { symbol } of Object.values(equation.inputs)) yield { tex: symbol, isDisplay: false };
 }
 
 /** Pages of all sheets that revisions in force rest on; of two versions of a sheet the newest revision's stands. */

@@ -161,7 +161,7 @@ function stepPart(view: RevisionView, step: SealedStep, typesetter: Typesetter) 
   return {
     term: view.words.say(`terms.${step.term}`),
     band: band ? view.words.say("workings.at-band", { band }) : "",
-    line: typesetter.display(numberLine(printable(equation), step.inputs)),
+    line: typesetter.display(numberTex(view, step)),
     equation: equation.id,
     source: view.words.say("workings.step-source", {
       document: equation.source.document,
@@ -177,11 +177,13 @@ function sealed(view: RevisionView, step: SealedStep): SealedEquation {
   return found;
 }
 
+/** Number lines already made, by the sealed step they belong to: the pages in force and those of the revision share them. */
+const lines = new WeakMap<SealedStep, string>();
+
 /** TeX of the numbers of a step as the revision sealed it. */
 export function numberTex(view: RevisionView, step: SealedStep): string {
-  return numberLine(printable(sealed(view, step)), step.inputs);
-}
-
-function printable(equation: SealedEquation): Parameters<typeof numberLine>[0] {
-  return equation as unknown as Parameters<typeof numberLine>[0];
+  const equation = sealed(view, step) as unknown as Parameters<typeof numberLine>[0];
+  const line = lines.get(step) ?? numberLine(equation, step.inputs);
+  lines.set(step, line);
+  return line;
 }
