@@ -1,10 +1,11 @@
 import type { Stretch } from "./window-hours.ts";
 
 /**
- * The sets of activities that work at the same time on one day.
+ * The sets of activities that work at the same time on one day, the largest ones: what is left when one ends is part of the
+ * set before, and never louder.
  *
  * @param stretches  per activity, its stretches within the period [min]
- * @returns          each distinct set of indexes that some moment of the period holds, the empty one left out
+ * @returns          each distinct set of indexes at a moment at which one of them begins
  */
 export function setsAtOnce(stretches: readonly (readonly Stretch[])[]): readonly (readonly number[])[] {
   const starts = [...new Set(stretches.flat().map((stretch) => stretch.fromMin))];

@@ -1,5 +1,5 @@
 import type { Activity } from "../documents/types/statement.gen.ts";
-import { datesFrom } from "../programme/dates.ts";
+import { datesFrom, daysAfter } from "../programme/dates.ts";
 import type { ClockWindow } from "../programme/window-hours.ts";
 import { stretchesInPeriod } from "../programme/window-hours.ts";
 
@@ -10,7 +10,8 @@ const WHOLE_DAY: ClockWindow = { days: [], from: "00:00", to: "24:00" };
 export function everCoincide(a: Activity, b: Activity): boolean {
   const [, from = a.from] = [a.from, b.from].sort();
   const [until = a.until] = [a.until, b.until].sort();
-  return datesFrom(from, until).some((date) => {
+  // A window begun on the last evening runs on into the morning after.
+  return datesFrom(from, daysAfter(until, 1)).some((date) => {
     const others = stretchesInPeriod(b, WHOLE_DAY, date);
     return stretchesInPeriod(a, WHOLE_DAY, date).some((own) =>
       others.some((other) => own.fromMin < other.toMin && other.fromMin < own.toMin),

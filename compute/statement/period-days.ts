@@ -1,4 +1,4 @@
-import { datesFrom, dayOf } from "../programme/dates.ts";
+import { datesFrom, dayOf, daysAfter } from "../programme/dates.ts";
 import type { Stretch } from "../programme/window-hours.ts";
 import { stretchesInPeriod } from "../programme/window-hours.ts";
 import type { StatementInputs } from "./inputs.ts";
@@ -27,7 +27,8 @@ export function periodDays(inputs: StatementInputs, ref: RuleRef): readonly Peri
 
 function distinctDays({ statement }: StatementInputs, { rule }: RuleRef): readonly PeriodDay[] {
   const kinds = new Map<string, PeriodDay>();
-  for (const date of datesFrom(statement.from, statement.until)) {
+  // A night period may begin the evening before the first day, and work begun on the last evening ends the morning after.
+  for (const date of datesFrom(daysAfter(statement.from, -1), daysAfter(statement.until, 1))) {
     if (!rule.period.days.includes(dayOf(date))) continue;
     const work = statement.activities
       .map((activity) => ({ activity: activity.id, stretches: stretchesInPeriod(activity, rule.period, date) }))
