@@ -57,17 +57,15 @@ function governingAt(inputs: StatementInputs, period: PeriodFigure): Governing {
   return { point: period.point, rule: period.rule, activity, item: level.item.id, path, bandHz, steps: kept };
 }
 
-/** The item with the largest part in a period level: level while running, on-time and hours together. */
+/** The item with the largest part in a period level, each at the share of time that counted in it. */
 function loudestItem(inputs: StatementInputs, period: PeriodFigure): { activity: string; level: ItemLevel } {
   const assessment = assess(silently, inputs, adoptedIds(inputs));
-  const parts = period.activities.flatMap(({ id, windowH }) =>
-    assessment.itemLevels(id, period.point).map((level) => ({
-      activity: id,
-      level,
-      partDb: level.levelDba + 10 * Math.log10((level.item.onTimePct / 100) * windowH),
-    })),
-  );
-  return parts.reduce((kept, next) => (kept.partDb >= next.partDb ? kept : next));
+  const loudest = period.activities
+    .flatMap(({ id, shares }) => shares.map((share) => ({ activity: id, ...share })))
+    .reduce((kept, next) => (kept.levelDba >= next.levelDba ? kept : next));
+  const level = assessment.itemLevels(loudest.activity, period.point).find(({ item }) => item.id === loudest.item);
+  if (!level) throw new Error(`"${loudest.item}" is not part of "${loudest.activity}"`);
+  return { activity: loudest.activity, level };
 }
 
 function loudestPath({ propagation }: ItemLevel): { path: PathTerms["path"]; bandHz: BandHz } {
