@@ -41,7 +41,9 @@ export type Standing =
 export function standing(levelDb: number, limitDb: number, comparator: "above" | "at-or-above"): Standing {
   const difference = levelDb - limitDb;
   const isOver = comparator === "above" ? difference > 0 : difference >= 0;
-  const by = tenthDb(Math.abs(difference));
+  // Subtraction leaves 75.05 − 75 at 0.0499…97: the same nudge as in `decimals`, by the size of what was subtracted.
+  const noise = 4 * Number.EPSILON * Math.max(Math.abs(levelDb), Math.abs(limitDb));
+  const by = tenthDb(Math.abs(difference) + noise);
   if (isOver) return by === "0.0" ? { kind: "just-over", by: "0.1" } : { kind: "over", by };
   if (difference === 0) return { kind: "at" };
   return by === "0.0" ? { kind: "just-below", by: "0.1" } : { kind: "below", by };
