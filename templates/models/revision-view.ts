@@ -20,8 +20,7 @@ export interface RevisionView {
 /** Whether a revision is the one that counts on the date of the build. */
 export type Standing =
   | { readonly kind: "in-force" }
-  | { readonly kind: "superseded"; readonly by: number; readonly from: string }
-  | { readonly kind: "not-yet"; readonly from: string };
+  | { readonly kind: "superseded"; readonly by: number; readonly from: string };
 
 /** A revision with the words it was sealed with. */
 export function revisionView(revision: Revision, folder: string, standing: Standing): RevisionView {

@@ -35,15 +35,19 @@ export interface SiteParts {
   /** Today's words, for the pages that belong to no revision. */
   readonly wording: Wording;
   readonly method: ReadonlyMap<string, string>;
-  /** Date that decides which revision is in force. */
+  /** Date of the site: it holds what was issued by then, the last of each phase being in force. */
   readonly asOf: string;
 }
 
 /** The pages and files of a site, from sealed revisions and nothing else but the words and prose of its living pages. */
-export function siteOf({ phases, wording, method, asOf }: SiteParts): Site {
+export function siteOf({ phases: everIssued, wording, method, asOf }: SiteParts): Site {
   const words = wordsOf(wording);
+  const phases = everIssued.map((phase) => ({
+    ...phase,
+    revisions: phase.revisions.filter(({ issuedOn }) => issuedOn <= asOf),
+  }));
   const inForce = phases.flatMap((phase) => {
-    const revision = phase.revisions.findLast(({ issuedOn }) => issuedOn <= asOf);
+    const revision = phase.revisions.at(-1);
     return revision
       ? [
           {
@@ -55,7 +59,7 @@ export function siteOf({ phases, wording, method, asOf }: SiteParts): Site {
   });
   const forEver = phases.flatMap(({ project, phase, revisions }) =>
     revisions.map((revision) =>
-      revisionView(revision, `${project}/${phase}/r${revision.number}/`, standingOf(revision, revisions, asOf)),
+      revisionView(revision, `${project}/${phase}/r${revision.number}/`, standingOf(revision, revisions)),
     ),
   );
   const views = [...inForce.map(({ view }) => view), ...forEver];
@@ -66,10 +70,7 @@ export function siteOf({ phases, wording, method, asOf }: SiteParts): Site {
       homePage(words, projects, asOf),
       ...projects.map((project) => projectPage(words, project, asOf)),
       ...views.flatMap((view) => [statementPage(view), workingsPage(view, typesetter), earProtectionPage(view)]),
-      ...sheetPages(
-        words,
-        inForce.map(({ view }) => view),
-      ),
+      ...sheetPages(words, forEver),
       calculationPage(words, method, typesetter),
     ],
     files: [
@@ -86,10 +87,9 @@ export function siteOf({ phases, wording, method, asOf }: SiteParts): Site {
   };
 }
 
-function standingOf(revision: Revision, revisions: readonly Revision[], asOf: string): Standing {
-  if (revision.issuedOn > asOf) return { kind: "not-yet", from: revision.issuedOn };
-  const next = revisions.findLast(({ number, issuedOn }) => number > revision.number && issuedOn <= asOf);
-  return next ? { kind: "superseded", by: next.number, from: next.issuedOn } : { kind: "in-force" };
+function standingOf(revision: Revision, revisions: readonly Revision[]): Standing {
+  const last = revisions.at(-1) ?? revision;
+  return last === revision ? { kind: "in-force" } : { kind: "superseded", by: last.number, from: last.issuedOn };
 }
 
 /** Projects with a revision in force; the newest revision says what the project is. */
@@ -126,9 +126,11 @@ function* printedOf(equation: {
   for (const { symbol } of Object.values(equation.inputs)) yield { tex: symbol, isDisplay: false };
 }
 
-/** Pages of all sheets that revisions in force rest on; of two versions of a sheet the newest revision's stands. */
+/** Pages of all sheets that revisions rest on; of two versions of a sheet that of the newest revision in force stands. */
 function sheetPages(words: ReturnType<typeof wordsOf>, views: readonly RevisionView[]): readonly Page[] {
-  const newestLast = [...views].sort((a, b) => (a.revision.issuedOn < b.revision.issuedOn ? -1 : 1));
+  const rank = ({ revision, standing }: RevisionView) =>
+    `${standing.kind === "in-force" ? 1 : 0} ${revision.issuedOn} ${revision.project}/${revision.phase}`;
+  const newestLast = [...views].sort((a, b) => (rank(a) < rank(b) ? -1 : 1));
   const all = <T>(pick: (view: RevisionView) => Readonly<Record<string, T>>): readonly T[] =>
     Object.entries(Object.assign({}, ...newestLast.map(pick)) as Record<string, T>)
       .sort(([a], [b]) => (a < b ? -1 : 1))

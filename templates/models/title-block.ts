@@ -44,10 +44,5 @@ export function banner(view: RevisionView): Banner {
           date: dateText(words, standing.from),
         }),
       };
-    case "not-yet":
-      return {
-        kind: "not-in-force",
-        text: words.say("block.not-yet", { number: revision.number, date: dateText(words, standing.from) }),
-      };
   }
 }
