@@ -1,9 +1,8 @@
-import { distanceToLevel } from "../equations/hearing/distance-to-level.ts";
 import type { Working } from "../equations/working.ts";
 import type { Exchange, Shift } from "./edge-level.ts";
 import { GOOD_PRACTICE_DBA, goodPracticeCounts, valueEdgeDba } from "./edge-level.ts";
-
-type Comparator = "above" | "at-or-above";
+import type { Comparator, Peak } from "./peak.ts";
+import { meets, peakMeets } from "./peak.ts";
 
 /** Level and peak from which a duty set asks for something. */
 export interface ActionValue {
@@ -26,7 +25,7 @@ export interface Place {
   /** Sum of all machines 1 m outside its outline and swing [dB(A)]. */
   readonly besideDba: number;
   readonly workStationDba: number | undefined;
-  readonly peak: { readonly levelDbc: number; readonly distanceM: number } | undefined;
+  readonly peak: Peak | undefined;
   readonly impulsive: boolean;
 }
 
@@ -91,18 +90,8 @@ function levelReasons(place: Place, edgeDba: number, comparator: Comparator): re
   ];
 }
 
-/** Peak data meet a value at the distance they hold for, or 1 m outside the machine if that is nearer. */
-function peakReasons(working: Working, place: Place, value: ActionValue): readonly Reason[] {
-  const { peak, machine } = place;
+function peakReasons(working: Working, { peak, machine }: Place, value: ActionValue): readonly Reason[] {
   if (!peak || value.peakDbc === undefined) return [];
-  const { levelDbc, distanceM: atDistanceM } = peak;
-  const reachM = working
-    .at(`machine:${machine}`)
-    .work(distanceToLevel, { levelDb: levelDbc, atDistanceM, targetDb: value.peakDbc }, "peak-distance");
-  const reached = meets(levelDbc, value.peakDbc, value.peakComparator) || meets(reachM, 1, value.peakComparator);
-  return reached ? [{ kind: "peak", machine, levelDbc }] : [];
-}
-
-function meets(value: number, from: number, comparator: Comparator): boolean {
-  return comparator === "above" ? value > from : value >= from;
+  const reached = peakMeets(working.at(`machine:${machine}`), peak, value.peakDbc, value.peakComparator);
+  return reached ? [{ kind: "peak", machine, levelDbc: peak.levelDbc }] : [];
 }

@@ -16,6 +16,8 @@ export interface ZoneReach {
 /** Directions looked at round a machine, and steps along each; the crossing is then halved down to a millimetre. */
 const DIRECTIONS = 72;
 const STEPS = 80;
+/** The best direction is then looked at more closely: steps to either side [°], ten of them each time. */
+const CLOSER_DEG = [0.5, 0.05] as const;
 
 /** Level of all machines together at a place [dB(A)], by the zone rule. */
 export function zoneSumDba(working: Working, machines: readonly WalledMachine[], place: Place): number {
@@ -43,11 +45,25 @@ export function zoneReach(
   const leads = (place: Place) => isLedBy(machine, together, place, edgeDba);
   const corners = machine.outline.map((corner) => planDistanceM(corner, machine.at));
   const outermostM = reachBoundM(machine, together.length, edgeDba) + Math.max(machine.swingM, ...corners);
+  const along = (degrees: number) => farthestAlong(machine, degrees, outermostM, leads) ?? [];
   // Alone, the level falls with distance from the outline only: one direction shows it.
-  const reaches = directions(together.length === 1 ? 1 : DIRECTIONS).flatMap(
-    (direction) => farthestAlong(machine, direction, outermostM, leads) ?? [],
-  );
-  return reaches.reduce<ZoneReach | undefined>(
+  if (together.length === 1) return farthest([along(0)].flat());
+  const found = farthest(everyDirection().flatMap(along));
+  return CLOSER_DEG.reduce<Reach | undefined>((kept, stepDeg) => {
+    if (!kept) return undefined;
+    const { degrees } = kept;
+    const beside = Array.from({ length: 21 }, (_, index) => degrees + (index - 10) * stepDeg);
+    return farthest([kept, ...beside.flatMap(along)]);
+  }, found);
+}
+
+/** A reach with the direction it was found in, clockwise from north [°]. */
+interface Reach extends ZoneReach {
+  readonly degrees: number;
+}
+
+function farthest(reaches: readonly Reach[]): Reach | undefined {
+  return reaches.reduce<Reach | undefined>(
     (kept, next) => (kept && kept.distanceM >= next.distanceM ? kept : next),
     undefined,
   );
@@ -66,25 +82,24 @@ function isLedBy(machine: WalledMachine, together: readonly WalledMachine[], pla
   return zoneSumDba(silently, together, place) >= edgeDba;
 }
 
-function directions(count: number): readonly { readonly x: number; readonly y: number }[] {
-  return Array.from({ length: count }, (_, index) => {
-    const angle = (2 * Math.PI * index) / count;
-    return { x: Math.sin(angle), y: Math.cos(angle) };
-  });
+function everyDirection(): readonly number[] {
+  return Array.from({ length: DIRECTIONS }, (_, index) => (360 * index) / DIRECTIONS);
 }
 
 function farthestAlong(
   machine: WalledMachine,
-  direction: { readonly x: number; readonly y: number },
+  degrees: number,
   outermostM: number,
   leads: (place: Place) => boolean,
-): ZoneReach | undefined {
-  const placeAt = (m: number): Place => ({ xM: machine.at.xM + m * direction.x, yM: machine.at.yM + m * direction.y });
+): Reach | undefined {
+  const angle = (degrees * Math.PI) / 180;
+  const [east, north] = [Math.sin(angle), Math.cos(angle)];
+  const placeAt = (m: number): Place => ({ xM: machine.at.xM + m * east, yM: machine.at.yM + m * north });
   const stepM = outermostM / STEPS;
   for (let step = STEPS; step >= 0; step--) {
     if (!leads(placeAt(step * stepM))) continue;
     const m = halved(step * stepM, (step + 1) * stepM, (out) => leads(placeAt(out)));
-    return { at: placeAt(m), distanceM: Math.max(1, distanceToMachineM(machine, placeAt(m))) };
+    return { degrees, at: placeAt(m), distanceM: Math.max(1, distanceToMachineM(machine, placeAt(m))) };
   }
   return undefined;
 }

@@ -3,6 +3,7 @@ import type { Working } from "../equations/working.ts";
 import { distanceToOutlineM } from "../geometry/outline.ts";
 import type { Place } from "../geometry/place.ts";
 import { planDistanceM } from "../geometry/place.ts";
+import type { Peak } from "./peak.ts";
 
 /** A machine as the zone rule sees it: at full running, with its outline and swing and what reflects beside it. */
 export interface ZoneMachine {
@@ -20,7 +21,7 @@ export interface ZoneMachine {
   readonly workStationDba: number | undefined;
   readonly impulsive: boolean;
   /** C-weighted peak level at a distance [dB(C)], where a data sheet gives one. */
-  readonly peak: { readonly levelDbc: number; readonly distanceM: number } | undefined;
+  readonly peak: Peak | undefined;
   /** An open place has a radius; in a trench, a room, a tunnel or under a slab the whole space is the zone. */
   readonly open: boolean;
 }

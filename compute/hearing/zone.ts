@@ -1,7 +1,8 @@
-import { distanceToLevel } from "../equations/hearing/distance-to-level.ts";
 import type { Working } from "../equations/working.ts";
 import type { Place } from "../geometry/place.ts";
 import { highestBesideDba } from "./beside.ts";
+import type { Comparator } from "./peak.ts";
+import { peakDistanceM, peakMeets } from "./peak.ts";
 import { zoneReach, zoneSumDba } from "./zone-distance.ts";
 import type { WalledMachine } from "./zone-machine.ts";
 
@@ -30,11 +31,19 @@ export type Zone =
     }
   | { readonly kind: "none"; readonly machine: string };
 
+/** Peak data that meet the value make a zone; it is marked out to where they come down to the value less U. */
+export interface PeakEdge {
+  readonly valueDbc: number;
+  readonly comparator: Comparator;
+  /** U [dB]. */
+  readonly uncertaintyDb: number;
+}
+
 export interface ZoneEdges {
   /** Edge level [dB(A)]. */
   readonly levelDba: number;
-  /** Edge of the peak criterion [dB(C)], where the duty set has one. */
-  readonly peakDbc: number | undefined;
+  /** The peak criterion, where the duty set has one. */
+  readonly peak: PeakEdge | undefined;
 }
 
 /**
@@ -55,7 +64,7 @@ export function zoneOf(
     const leastM = machine.open ? zoneReach(machine, together, edges.levelDba)?.distanceM : undefined;
     return { kind: "peak-not-known", machine: machine.id, leastM };
   }
-  const peakM = peakDistanceM(working, machine, edges.peakDbc);
+  const peakM = peakReachM(working, machine, edges.peak);
   const loudBeside = highestBesideDba(working, machine, together) >= edges.levelDba;
   const loud = loudBeside || (machine.workStationDba ?? 0) >= edges.levelDba;
   if (!loud && peakM === undefined) return { kind: "none", machine: machine.id };
@@ -81,13 +90,8 @@ function distanceZone(machine: WalledMachine, distanceM: number, at: Place, by: 
   };
 }
 
-/** Distance within which peak data reach the peak criterion [m], at least 1; nothing without data, criterion or reach. */
-function peakDistanceM(working: Working, machine: WalledMachine, edgeDbc: number | undefined): number | undefined {
-  if (!machine.peak || edgeDbc === undefined) return undefined;
-  const distanceM = working.work(
-    distanceToLevel,
-    { levelDb: machine.peak.levelDbc, atDistanceM: machine.peak.distanceM, targetDb: edgeDbc },
-    "peak-distance",
-  );
-  return distanceM < 1 ? undefined : distanceM;
+/** Distance to mark for the peak criterion [m], at least 1; nothing without data or criterion, or if the data do not meet it. */
+function peakReachM(working: Working, machine: WalledMachine, edge: PeakEdge | undefined): number | undefined {
+  if (!machine.peak || !edge || !peakMeets(working, machine.peak, edge.valueDbc, edge.comparator)) return undefined;
+  return Math.max(1, peakDistanceM(working, machine.peak, edge.valueDbc - edge.uncertaintyDb));
 }

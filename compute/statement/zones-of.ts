@@ -6,7 +6,7 @@ import { zoneEdgeDba } from "../hearing/edge-level.ts";
 import type { Duty, Notice } from "../hearing/notice.ts";
 import { notice } from "../hearing/notice.ts";
 import { withWalls } from "../hearing/walls.ts";
-import type { Zone } from "../hearing/zone.ts";
+import type { PeakEdge, Zone } from "../hearing/zone.ts";
 import { zoneOf } from "../hearing/zone.ts";
 import type { WalledMachine, ZoneMachine } from "../hearing/zone-machine.ts";
 import type { Assessment } from "./assess.ts";
@@ -52,8 +52,7 @@ export function earProtection(working: Working, inputs: StatementInputs, assessm
   const duty = dutyOf(entry(inputs.duties, dutySet, "duty set"));
   const shift = shiftOf(inputs, assessment.scene);
   const edgeDba = zoneEdgeDba(working, duty.mandatoryFrom.levelDba, duty.exchange, shift);
-  const peakDbc =
-    duty.mandatoryFrom.peakDbc === undefined ? undefined : duty.mandatoryFrom.peakDbc - shift.uncertaintyDb;
+  const peak = peakEdge(duty, shift);
   const machines = new Map(
     assessment.scene.activities.map((activity) => [activity.id, zoneMachines(working, inputs, activity)] as const),
   );
@@ -68,7 +67,7 @@ export function earProtection(working: Working, inputs: StatementInputs, assessm
   );
   const zones = located.map(({ activity, machine, together }): ItemZone => {
     const here = working.at(`activity:${activity.id}`, `item:${machine.id}`);
-    const zone = zoneOf(here, machine, together, { levelDba: edgeDba, peakDbc });
+    const zone = zoneOf(here, machine, together, { levelDba: edgeDba, peak });
     return {
       activity: activity.id,
       item: machine.id,
@@ -88,10 +87,18 @@ export function earProtection(working: Working, inputs: StatementInputs, assessm
   return { dutySet, shift, edgeDba, zones, notice: notice(working, duty, places, shift) };
 }
 
-/** U of the zone rule: the largest uncertainty among the plant's levels, never under 3 dB. */
+function peakEdge({ mandatoryFrom }: Duty, { uncertaintyDb }: Shift): PeakEdge | undefined {
+  const { peakDbc: valueDbc, peakComparator: comparator } = mandatoryFrom;
+  return valueDbc === undefined ? undefined : { valueDbc, comparator, uncertaintyDb };
+}
+
+/** U of the zone rule: the largest uncertainty among all levels of the plant at work, never under 3 dB. */
 function shiftOf(inputs: StatementInputs, scene: Scene): Shift {
   const sheets = scene.activities.flatMap((activity) => activity.items.map((item) => item.sheet));
-  const uncertainties = sheets.map((sheet) => entry(inputs.plant, sheet, "plant").emission.uncertaintyDb);
+  const uncertainties = sheets.flatMap((id) => {
+    const { emission, workStation, peak } = entry(inputs.plant, id, "plant");
+    return [emission, workStation, peak].flatMap((level) => level?.uncertaintyDb ?? []);
+  });
   return { shiftH: inputs.statement.shiftH, uncertaintyDb: Math.max(3, ...uncertainties) };
 }
 
