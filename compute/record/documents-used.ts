@@ -32,10 +32,11 @@ export function documentsUsed(
       control.kind === "screen" || ("appliesTo" in control && control.appliesTo.some((id) => items.includes(id)));
     return acts && control.state.kind === "adopted" ? [{ control, index }] : [];
   });
-  const sheets = new Set([
+  const named = [
     ...used.flatMap(({ activity }) => activity.plant.map((item) => `plant/${item.sheet}`)),
     ...controls.flatMap(({ control }) => sheetsOf(control)),
-  ]);
+  ];
+  const sheets = new Set([...named, ...named.flatMap((sheet) => lenderOf(inputs, sheet))]);
   return [
     ...used.map(({ index }) => ({ document: "statement", pointer: `/activities/${index}` })),
     ...controls.map(({ index }) => ({ document: "statement", pointer: `/controls/${index}` })),
@@ -68,6 +69,13 @@ function sheetsOf(control: StatementInputs["statement"]["controls"][number]): re
     default:
       return [];
   }
+}
+
+/** The sheet whose octave shape a single level borrows. */
+function lenderOf(inputs: StatementInputs, document: string): readonly string[] {
+  const [kind, id = ""] = document.split("/");
+  const emission = kind === "plant" ? inputs.plant[id]?.emission : undefined;
+  return emission?.kind === "single" && emission.shapeFrom !== undefined ? [`plant/${emission.shapeFrom}`] : [];
 }
 
 function sheetUse(inputs: StatementInputs, document: string): DocumentUse {
