@@ -2,9 +2,18 @@ import { crossing } from "./crossing.ts";
 import type { Place } from "./place.ts";
 import { planDistanceM } from "./place.ts";
 
+type Side = readonly [Place, Place];
+
+/** Sides already made: distances to one outline are asked for at thousands of positions. */
+const known = new WeakMap<readonly Place[], readonly Side[]>();
+
 /** The sides of a closed outline, each as its two ends. */
-export function sides(outline: readonly Place[]): readonly (readonly [Place, Place])[] {
-  return outline.map((corner, index) => [corner, outline[(index + 1) % outline.length] as Place] as const);
+export function sides(outline: readonly Place[]): readonly Side[] {
+  const made =
+    known.get(outline) ??
+    outline.map((corner, index): Side => [corner, outline[(index + 1) % outline.length] as Place]);
+  known.set(outline, made);
+  return made;
 }
 
 /** Whether a position lies inside a closed outline (even-odd rule). */

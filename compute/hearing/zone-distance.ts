@@ -45,21 +45,23 @@ export function zoneReach(
   const leads = (place: Place) => isLedBy(machine, together, place, edgeDba);
   const corners = machine.outline.map((corner) => planDistanceM(corner, machine.at));
   const outermostM = reachBoundM(machine, together.length, edgeDba) + Math.max(machine.swingM, ...corners);
-  const along = (degrees: number) => farthestAlong(machine, degrees, outermostM, leads) ?? [];
+  const along = (degrees: number, fromM: number) =>
+    farthestAlong(machine, degrees, fromM, outermostM / STEPS, leads) ?? [];
   // Alone, the level falls with distance from the outline only: one direction shows it.
-  if (together.length === 1) return farthest([along(0)].flat());
-  const found = farthest(everyDirection().flatMap(along));
+  if (together.length === 1) return farthest([along(0, outermostM)].flat());
+  const found = farthest(everyDirection().flatMap((degrees) => along(degrees, outermostM)));
   return CLOSER_DEG.reduce<Reach | undefined>((kept, stepDeg) => {
     if (!kept) return undefined;
-    const { degrees } = kept;
+    const { degrees, outM } = kept;
     const beside = Array.from({ length: 21 }, (_, index) => degrees + (index - 10) * stepDeg);
-    return farthest([kept, ...beside.flatMap(along)]);
+    return farthest([kept, ...beside.flatMap((each) => along(each, outM + (2 * outermostM) / STEPS))]);
   }, found);
 }
 
-/** A reach with the direction it was found in, clockwise from north [°]. */
+/** A reach with the direction it was found in, clockwise from north [°], and its distance from the machine's position [m]. */
 interface Reach extends ZoneReach {
   readonly degrees: number;
+  readonly outM: number;
 }
 
 function farthest(reaches: readonly Reach[]): Reach | undefined {
@@ -86,20 +88,22 @@ function everyDirection(): readonly number[] {
   return Array.from({ length: DIRECTIONS }, (_, index) => (360 * index) / DIRECTIONS);
 }
 
+/** The farthest place in one direction that holds, looked for from `fromM` inwards. */
 function farthestAlong(
   machine: WalledMachine,
   degrees: number,
-  outermostM: number,
+  fromM: number,
+  stepM: number,
   leads: (place: Place) => boolean,
 ): Reach | undefined {
   const angle = (degrees * Math.PI) / 180;
   const [east, north] = [Math.sin(angle), Math.cos(angle)];
   const placeAt = (m: number): Place => ({ xM: machine.at.xM + m * east, yM: machine.at.yM + m * north });
-  const stepM = outermostM / STEPS;
-  for (let step = STEPS; step >= 0; step--) {
+  for (let step = Math.ceil(fromM / stepM); step >= 0; step--) {
     if (!leads(placeAt(step * stepM))) continue;
-    const m = halved(step * stepM, (step + 1) * stepM, (out) => leads(placeAt(out)));
-    return { degrees, at: placeAt(m), distanceM: Math.max(1, distanceToMachineM(machine, placeAt(m))) };
+    const outM = halved(step * stepM, (step + 1) * stepM, (out) => leads(placeAt(out)));
+    const at = placeAt(outM);
+    return { degrees, outM, at, distanceM: Math.max(1, distanceToMachineM(machine, at)) };
   }
   return undefined;
 }
