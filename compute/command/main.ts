@@ -1,3 +1,5 @@
+import { WordError } from "../../templates/models/words.ts";
+import { nearest } from "../documents/nearest.ts";
 import { RecordError } from "../record/issued-revisions.ts";
 import type { Command, Outcome, Place } from "./command.ts";
 import { commands } from "./commands.ts";
@@ -9,7 +11,7 @@ export { strict } from "../../templates/models/strict.ts";
 export async function run(args: readonly string[], place: Place): Promise<number> {
   const [name = "", ...rest] = args;
   const command = commands[name];
-  if (!command) return print(unknown(name));
+  if (!command) return print(name === "" || name === "--help" ? listed() : unknown(name));
   if (rest.includes("--help")) return print({ code: 0, out: command.help, err: "" });
   return print(await outcome(command, rest, place));
 }
@@ -18,8 +20,8 @@ async function outcome(command: Command, args: readonly string[], place: Place):
   try {
     return await command.run(args, place);
   } catch (error) {
-    // A sealed file or an output folder is for the user to mend; anything else is our own fault and keeps its trace.
-    if (error instanceof RecordError || error instanceof OutputError)
+    // Sealed files, words and output folders are for the user to mend; anything else is our own fault and keeps its trace.
+    if (error instanceof RecordError || error instanceof OutputError || error instanceof WordError)
       return { code: 1, out: "", err: `${error.message}\n` };
     throw error;
   }
@@ -31,10 +33,16 @@ function print({ code, out, err }: Outcome): number {
   return code;
 }
 
-function unknown(name: string): Outcome {
+function listed(): Outcome {
   const lines = Object.entries(commands).map(([each, { summary }]) => `  npm run ${each.padEnd(9)} ${summary}\n`);
-  const list = `Commands:\n${lines.join("")}`;
-  return name === ""
-    ? { code: 0, out: list, err: "" }
-    : { code: 1, out: "", err: `there is no command "${name}"\n${list}` };
+  return { code: 0, out: `Commands:\n${lines.join("")}`, err: "" };
+}
+
+function unknown(name: string): Outcome {
+  const near = nearest(name, Object.keys(commands));
+  return {
+    code: 1,
+    out: "",
+    err: `there is no command "${name}"${near ? `; did you mean "${near}"?` : ""}\n${listed().out}`,
+  };
 }

@@ -1,6 +1,7 @@
 import type { Project } from "../../compute/documents/types/project.gen.ts";
 import type { Revision, SealedFigure } from "../../compute/documents/types/revision.gen.ts";
 import type { Control, PlantItem, Statement } from "../../compute/documents/types/statement.gen.ts";
+import { revisionFile } from "../../compute/record/issued-revisions.ts";
 import type { Words } from "./words.ts";
 import { textIn, wordsOf } from "./words.ts";
 
@@ -28,7 +29,10 @@ export function revisionView(revision: Revision, folder: string, standing: Stand
   const [first = "en"] = project.languages;
   const wording = revision.wording[first];
   if (!wording) throw new Error(`${revision.project}/${revision.phase} ${revision.number}: no words in ${first}`);
-  const words = wordsOf(wording);
+  const words = wordsOf(
+    wording,
+    `${revisionFile("content", revision.project, revision.phase, revision.number)} (${first})`,
+  );
   return { revision, project, statement, words, text: (text) => textIn(text, words.language, first), folder, standing };
 }
 

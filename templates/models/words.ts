@@ -9,17 +9,26 @@ export interface Words {
   readonly say: (key: string, parts?: Readonly<Record<string, string | number>>) => string;
 }
 
-/** The words of a wording document. */
-export function wordsOf(wording: Wording): Words {
+/** A word that pages need and a wording does not have; for the author of the wording to mend. */
+export class WordError extends Error {
+  override readonly name = "WordError";
+
+  constructor(file: string, what: string) {
+    super(`${file}: expected ${what}, received nothing. Write every word that pages print.`);
+  }
+}
+
+/** The words of a wording document; `file` is where they are kept, for messages. */
+export function wordsOf(wording: Wording, file = `content/wording/${wording.language}.json`): Words {
   const section = (name: string) => {
     const found = wording.sections[name];
-    if (!found) throw new Error(`content/wording/${wording.language}.json: there is no section "${name}"`);
+    if (!found) throw new WordError(file, `the section "${name}"`);
     return found;
   };
   const word = (key: string) => {
     const [name = "", ...rest] = key.split(".");
     const found = section(name)[rest.join(".")];
-    if (found === undefined) throw new Error(`content/wording/${wording.language}.json: there is no word "${key}"`);
+    if (found === undefined) throw new WordError(file, `the word "${key}"`);
     return found;
   };
   return {
