@@ -4,7 +4,7 @@ import { issuedRevisions } from "../record/issued-revisions.ts";
 import type { Command, Outcome, Place } from "./command.ts";
 import { usage } from "./command.ts";
 import { dateOption } from "./date-option.ts";
-import { freshFolder } from "./fresh-folder.ts";
+import { freshFolder, mendSwap } from "./fresh-folder.ts";
 import type { Checked } from "./load-valid.ts";
 import { loadValid } from "./load-valid.ts";
 import { readOptions } from "./options.ts";
@@ -48,6 +48,7 @@ interface BuildOptions {
 
 /** Makes the site; nothing is written before content, record and models are whole. */
 export async function buildSite({ content, out, asOf }: BuildOptions, place: Place): Promise<Outcome> {
+  mendSwap(out);
   const progress = progressOn();
   progress.tell("checking the content");
   const checked = loadValid(content);

@@ -23,5 +23,6 @@ export interface Command {
 
 /** A command line that cannot be read: what is wrong, and where to look. */
 export function usage(name: string, problem: string): Outcome {
-  return { code: 1, out: "", err: `${name}: ${problem}. See npm run ${name} -- --help\n` };
+  const sentence = /[.?]$/.test(problem) ? problem : `${problem}.`;
+  return { code: 1, out: "", err: `${name}: ${sentence} See npm run ${name} -- --help\n` };
 }

@@ -34,7 +34,7 @@ The terms are held against those stored in the revision. Without a key the revis
     if (!revision)
       return usage(
         "explain",
-        `there is no revision ${asked ?? ""} of ${target}; issued: ${revisions.map(({ number }) => number).join(", ") || "none"}`,
+        `there is no revision ${asked === undefined ? "" : `${asked} `}of ${target}; issued: ${revisions.map(({ number }) => number).join(", ") || "none"}`,
       );
     if (key === undefined)
       return { code: 0, out: revision.figures.map((figure) => `${figure.key}\n`).join(""), err: "" };

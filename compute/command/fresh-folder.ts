@@ -1,4 +1,4 @@
-import { existsSync, mkdirSync, readdirSync, renameSync, rmSync } from "node:fs";
+import { existsSync, mkdirSync, readdirSync, renameSync, rmSync, statSync } from "node:fs";
 import path from "node:path";
 
 /** A folder beside the published one, in which a site is made before it takes the other's place. */
@@ -11,15 +11,19 @@ export interface FreshFolder {
 }
 
 /**
- * Makes a fresh folder beside `out`. What an interrupted swap left behind is put right first: an old site whose place is empty
- * goes back, half-made folders go away.
+ * Puts right what an interrupted swap left behind: an old site whose place is empty goes back, half-made folders go away.
+ * Comes before anything else, so that the last site stands whatever becomes of this build.
  */
+export function mendSwap(out: string): void {
+  if (existsSync(`${out}.old`) && !existsSync(out)) renameSync(`${out}.old`, out);
+  rmSync(`${out}.old`, { recursive: true, force: true });
+  rmSync(`${out}.new`, { recursive: true, force: true });
+}
+
+/** Makes a fresh folder beside `out`. */
 export function freshFolder(out: string): FreshFolder {
   const old = `${out}.old`;
   const folder = `${out}.new`;
-  if (existsSync(old) && !existsSync(out)) renameSync(old, out);
-  rmSync(old, { recursive: true, force: true });
-  rmSync(folder, { recursive: true, force: true });
   refuseForeign(out);
   mkdirSync(folder, { recursive: true });
   return {
@@ -36,6 +40,11 @@ export function freshFolder(out: string): FreshFolder {
 /** A folder that holds something else than a site is never swapped away. */
 function refuseForeign(out: string): void {
   if (!existsSync(out)) return;
+  if (!statSync(out).isDirectory()) {
+    throw new OutputError(
+      `${path.resolve(out)}: expected a new folder or a site made before, received a file. Name another one with --out.`,
+    );
+  }
   const names = readdirSync(out);
   if (names.length > 0 && !names.includes("index.html")) {
     throw new OutputError(
