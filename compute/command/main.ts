@@ -10,7 +10,7 @@ export { strict } from "../../templates/models/strict.ts";
 /** Runs one command and prints what it leaves; the exit status comes back. */
 export async function run(args: readonly string[], place: Place): Promise<number> {
   const [name = "", ...rest] = args;
-  const command = commands[name];
+  const command = Object.hasOwn(commands, name) ? commands[name] : undefined;
   if (!command) return print(name === "" || name === "--help" ? listed() : unknown(name));
   if (rest.includes("--help")) return print({ code: 0, out: command.help, err: "" });
   return print(await outcome(command, rest, place));

@@ -42,6 +42,8 @@ function parse(file: string, html: string): Parsed {
   let annotation = 0;
   const parser = new Parser({
     onopentag: (name, attributes) => {
+      // Words of two elements are two words.
+      text += " ";
       if (name === "annotation") annotation++;
       if (attributes.id !== undefined) {
         if (ids.has(attributes.id)) links.push(`#id-twice:${attributes.id}`);
