@@ -7,12 +7,12 @@ export default defineConfig({
   test: {
     pool: "forks",
     globals: false,
+    // Tests of commands start programs of their own, which takes long on a busy machine.
+    testTimeout: 60_000,
+    hookTimeout: 60_000,
     projects: [
       { extends: true, test: { name: "program", include: ["test/**/*.test.ts"], exclude: [OF_THE_SITE] } },
-      {
-        extends: true,
-        test: { name: "site", include: [OF_THE_SITE], globalSetup: "test/helpers/site-setup.ts", testTimeout: 60_000 },
-      },
+      { extends: true, test: { name: "site", include: [OF_THE_SITE], globalSetup: "test/helpers/site-setup.ts" } },
     ],
   },
 });
