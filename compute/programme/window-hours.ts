@@ -60,11 +60,13 @@ export function stretchesInPeriod(
 
 /** Stretches in order with those that overlap or touch made one, so that no minute counts twice. */
 function merged(stretches: readonly Stretch[]): readonly Stretch[] {
-  return stretches.reduce<readonly Stretch[]>((done, next) => {
+  const done: Stretch[] = [];
+  for (const next of stretches) {
     const last = done.at(-1);
-    if (!last || next.fromMin > last.toMin) return [...done, next];
-    return [...done.slice(0, -1), { fromMin: last.fromMin, toMin: Math.max(last.toMin, next.toMin) }];
-  }, []);
+    if (!last || next.fromMin > last.toMin) done.push(next);
+    else done.splice(-1, 1, { fromMin: last.fromMin, toMin: Math.max(last.toMin, next.toMin) });
+  }
+  return done;
 }
 
 function shifted(stretch: Stretch, byMin: number): Stretch {
