@@ -1,9 +1,11 @@
+import { bench } from "./bench.ts";
 import { build } from "./build.ts";
 import { calc, calcHelp, calcSummary } from "./calc.ts";
 import { checkCommand } from "./check-command.ts";
 import type { Command } from "./command.ts";
 import { explain } from "./explain.ts";
 import { issue } from "./issue.ts";
+import { pictures } from "./pictures.ts";
 import { command as types } from "./types.ts";
 
 /** Every command by name. */
@@ -13,5 +15,7 @@ export const commands: Readonly<Record<string, Command>> = {
   issue,
   explain,
   calc: { summary: calcSummary, help: calcHelp, run: (args) => calc(args) },
+  bench,
+  pictures,
   types,
 };

@@ -1,6 +1,7 @@
 import { WordError } from "../../templates/models/words.ts";
 import { nearest } from "../documents/nearest.ts";
 import { RecordError } from "../record/issued-revisions.ts";
+import { BrowserError } from "./browser.ts";
 import type { Command, Outcome, Place } from "./command.ts";
 import { commands } from "./commands.ts";
 import { OutputError } from "./fresh-folder.ts";
@@ -20,8 +21,13 @@ async function outcome(command: Command, args: readonly string[], place: Place):
   try {
     return await command.run(args, place);
   } catch (error) {
-    // Sealed files, words and output folders are for the user to mend; anything else is our own fault and keeps its trace.
-    if (error instanceof RecordError || error instanceof OutputError || error instanceof WordError)
+    // Sealed files, words, output folders and browsers are for the user to mend; anything else is our own fault and keeps its trace.
+    if (
+      error instanceof RecordError ||
+      error instanceof OutputError ||
+      error instanceof WordError ||
+      error instanceof BrowserError
+    )
       return { code: 1, out: "", err: `${error.message}\n` };
     throw error;
   }

@@ -63,7 +63,7 @@ describe("calc lists and explains", () => {
         "wearing-time: protection left when worn part of the time, in dB",
         "  protectionDb  a number from 0 to 60 dB",
         "  wornPct  a number from 0 to 100 %",
-        "Stillboard, 1: energy at the ear with and without protector (worked out from its definition)",
+        "Stillboard, own rule: energy at the ear with and without protector (worked out from its definition)",
         "",
       ].join("\n"),
     );
