@@ -13,7 +13,7 @@ D_z &= \min\left( D_{\text{cap}}, 10 \lg \max\left( 1, 3 + \frac{C_2}{\lambda} C
   value: { symbol: "D_z", unit: "dB" },
   inputs: {
     bandHz: { kind: "one", symbol: "f", ...octaveBand },
-    pathDifferenceM: { kind: "one", symbol: "z", unit: "m", min: -1000, max: 1000, decimals: 3 },
+    pathDifferenceM: { kind: "one", symbol: "z", unit: "m", min: -30000, max: 30000, decimals: 3 },
     groundConstant: { kind: "one", symbol: "C_2", unit: "1", min: 20, max: 40, oneOf: [20, 40], decimals: 0 },
     edgeFactor: { kind: "one", symbol: "C_3", unit: "1", min: 1, max: 3, decimals: 3 },
     metFactor: { kind: "one", symbol: String.raw`K_{\text{met}}`, unit: "1", min: 0, max: 1, decimals: 3 },
