@@ -31,12 +31,46 @@ const NOTICE = [
   "Protectors are available and must be worn.",
 ];
 
+/** Width of an A4 sheet between its margins of 15 mm, in px of 1/96 inch. */
+const SHEET_PX = Math.floor(((210 - 2 * 15) / 25.4) * 96);
+
+interface PrintedTables {
+  readonly count: number;
+  /** Names of tables that reach over the sheet's edge. */
+  readonly tooWide: readonly string[];
+  /** How rows behave at the end of a sheet. */
+  readonly rowBreaks: readonly string[];
+}
+
+function printedTables(): PrintedTables {
+  const tables = [...document.querySelectorAll("table")];
+  const edge = document.body.getBoundingClientRect().right + 1;
+  const isTooWide = (table: Element) =>
+    [table, ...table.querySelectorAll("td, th")].some((part) => part.getBoundingClientRect().right > edge);
+  const rows = [...document.querySelectorAll("tr")];
+  return {
+    count: tables.length,
+    tooWide: tables.filter(isTooWide).map((table) => table.caption?.textContent ?? ""),
+    rowBreaks: [...new Set(rows.map((row) => getComputedStyle(row).breakInside))],
+  };
+}
+
 describe.each(["statement", "workings", "ear-protection"] as const)("%s in print", (type) => {
   let pdf: PrintedPdf;
+  let tables: PrintedTables;
   beforeAll(async () => {
     const { page } = await openPage(context, server.address + PAGE_TYPES[type]);
     pdf = await readPdf(await page.pdf({ preferCSSPageSize: true, tagged: true }));
+    await page.emulateMedia({ media: "print" });
+    await page.setViewportSize({ width: SHEET_PX, height: 1000 });
+    tables = await page.evaluate(printedTables);
     await page.close();
+  });
+
+  test("keeps tables on the sheet and rows whole", () => {
+    expect(tables.count).toBeGreaterThan(0);
+    expect(tables.tooWide).toEqual([]);
+    expect(tables.rowBreaks).toEqual(["avoid"]);
   });
 
   test("is A4 and tagged", () => {

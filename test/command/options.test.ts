@@ -1,3 +1,4 @@
+import { readFileSync } from "node:fs";
 import { describe, expect, test, vi } from "vitest";
 import { commands } from "../../compute/command/commands.ts";
 import { run } from "../../compute/command/main.ts";
@@ -25,6 +26,11 @@ async function runMain(...args: readonly string[]) {
 }
 
 describe("commands", () => {
+  test("have a line each in package.json", () => {
+    const { scripts } = JSON.parse(readFileSync("package.json", "utf8")) as { scripts: Record<string, string> };
+    for (const name of names) expect(scripts[name]).toBe(`node compute/command/launch.js ${name}`);
+  });
+
   test.each([[], ["--help"]])("are listed on standard output by %j", async (...args) => {
     const { code, out, err } = await runMain(...(args as readonly string[]));
     expect([code, err]).toEqual([0, ""]);
@@ -80,6 +86,8 @@ const WRONG: readonly (readonly [command: string, args: readonly string[], says:
   ["explain", ["saltpan-quay"], "explain: expected <project>/<phase> and a figure key. See npm run explain -- --help"],
   ["explain", ["a/b/c"], "explain: expected <project>/<phase> and a figure key. See npm run explain -- --help"],
   ["explain", ["--jsn"], "explain: there is no option --jsn; did you mean --json? See npm run explain -- --help"],
+  ["bench", ["now"], "bench: expected no further words, received now. See npm run bench -- --help"],
+  ["pictures", ["--wdth"], "pictures: there is no option --wdth. See npm run pictures -- --help"],
   ["types", ["now"], "types: expected no further words. See npm run types -- --help"],
   ["calc", ["--jsno"], "calc: there is no option --jsno; did you mean --json?"],
 ];

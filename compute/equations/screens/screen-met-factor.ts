@@ -11,7 +11,7 @@ export const screenMetFactor = equation({
     sourceToEdgeM: { kind: "one", symbol: String.raw`d_{\text{ss}}`, unit: "m", min: 0, max: 10000 },
     edgeToReceptorM: { kind: "one", symbol: String.raw`d_{\text{sr}}`, unit: "m", min: 0, max: 10000 },
     distanceM: { kind: "one", symbol: "d", unit: "m", min: 0, aboveMin: true, max: 10000 },
-    pathDifferenceM: { kind: "one", symbol: "z", unit: "m", min: -1000, max: 1000, decimals: 3 },
+    pathDifferenceM: { kind: "one", symbol: "z", unit: "m", min: -30000, max: 30000, decimals: 3 },
   },
   source: { document: "ISO 9613-2", edition: "1996", clause: "7.4, eq. (18)", checked: "read-secondary" },
   work: ({ sourceToEdgeM, edgeToReceptorM, distanceM, pathDifferenceM: z }) =>
