@@ -13,7 +13,8 @@ export function withWalls(machines: readonly ZoneMachine[], edgeDba: number): re
   for (;;) {
     const now = counted;
     const next = now.map((machine) => {
-      const reachM = machine.wallsM.length > machine.walls ? (zoneReach(machine, now, edgeDba)?.distanceM ?? 0) : 0;
+      const nextM = [...machine.wallsM].sort((a, b) => a - b)[machine.walls];
+      const reachM = nextM === undefined ? 0 : (zoneReach(machine, now, edgeDba, nextM)?.distanceM ?? 0);
       return { ...machine, walls: Math.max(machine.walls, wallsWithin(machine, reachM)) };
     });
     if (next.every((machine, index) => machine.walls === now[index]?.walls)) return next;

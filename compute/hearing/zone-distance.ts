@@ -35,26 +35,34 @@ export function zoneSumDba(working: Working, machines: readonly WalledMachine[],
  * @param machine   the machine
  * @param together  all machines that may run at the same time, this one among them
  * @param edgeDba   edge level [dB(A)]
+ * @param beyondM   only places farther out than this are looked for [m]
  * @returns         the farthest such place, at least 1 m out; nothing if another machine leads wherever the edge level is met
  */
 export function zoneReach(
   machine: WalledMachine,
   together: readonly WalledMachine[],
   edgeDba: number,
+  beyondM = 0,
 ): ZoneReach | undefined {
   const leads = (place: Place) => isLedBy(machine, together, place, edgeDba);
   const corners = machine.outline.map((corner) => planDistanceM(corner, machine.at));
   const outermostM = reachBoundM(machine, together.length, edgeDba) + Math.max(machine.swingM, ...corners);
-  const along = (degrees: number, fromM: number) =>
-    farthestAlong(machine, degrees, fromM, outermostM / STEPS, leads) ?? [];
+  const look = (degrees: number, fromM: number, kept: Reach | undefined) =>
+    farther(
+      kept,
+      farthestAlong(machine, degrees, { fromM, toM: kept?.distanceM ?? beyondM, stepM: outermostM / STEPS }, leads),
+    );
   // Alone, the level falls with distance from the outline only: one direction shows it.
-  if (together.length === 1) return farthest([along(0, outermostM)].flat());
-  const found = farthest(everyDirection().flatMap((degrees) => along(degrees, outermostM)));
+  if (together.length === 1) return look(0, outermostM, undefined);
+  const found = everyDirection().reduce<Reach | undefined>(
+    (kept, degrees) => look(degrees, outermostM, kept),
+    undefined,
+  );
   return CLOSER_DEG.reduce<Reach | undefined>((kept, stepDeg) => {
     if (!kept) return undefined;
     const { degrees, outM } = kept;
     const beside = Array.from({ length: 21 }, (_, index) => degrees + (index - 10) * stepDeg);
-    return farthest([kept, ...beside.flatMap((each) => along(each, outM + (2 * outermostM) / STEPS))]);
+    return beside.reduce<Reach | undefined>((best, each) => look(each, outM + (2 * outermostM) / STEPS, best), kept);
   }, found);
 }
 
@@ -64,11 +72,8 @@ interface Reach extends ZoneReach {
   readonly outM: number;
 }
 
-function farthest(reaches: readonly Reach[]): Reach | undefined {
-  return reaches.reduce<Reach | undefined>(
-    (kept, next) => (kept && kept.distanceM >= next.distanceM ? kept : next),
-    undefined,
-  );
+function farther(kept: Reach | undefined, next: Reach | undefined): Reach | undefined {
+  return !next || (kept && kept.distanceM >= next.distanceM) ? kept : next;
 }
 
 /** Beyond this distance a place that the machine leads cannot meet the edge level: all others are taken to be as loud. */
@@ -78,28 +83,42 @@ function reachBoundM(machine: WalledMachine, count: number, edgeDba: number): nu
 }
 
 function isLedBy(machine: WalledMachine, together: readonly WalledMachine[], place: Place, edgeDba: number): boolean {
+  if (isPlainlyLed(machine, together, place)) return false;
   const ownDba = machineLevelDba(silently, machine, place);
   if (ownDba + 10 * Math.log10(together.length) < edgeDba) return false;
-  if (together.some((other) => other !== machine && machineLevelDba(silently, other, place) > ownDba)) return false;
-  return zoneSumDba(silently, together, place) >= edgeDba;
+  const levelsDb = together.map((other) => (other === machine ? ownDba : machineLevelDba(silently, other, place)));
+  return levelsDb.every((level) => level <= ownDba) && sumLevels.of({ levelsDb }) >= edgeDba;
+}
+
+/**
+ * Whether another machine leads even if this one were as near as its size allows and the other no nearer than its middle: a
+ * bound that spares measuring to outlines.
+ */
+function isPlainlyLed(machine: WalledMachine, together: readonly WalledMachine[], place: Place): boolean {
+  const sizeM = Math.max(machine.swingM, ...machine.outline.map((corner) => planDistanceM(corner, machine.at)));
+  const nearestM = Math.max(1, planDistanceM(place, machine.at) - sizeM);
+  const highestDb = machine.powerDba + 3 * machine.walls - 20 * Math.log10(nearestM);
+  return together.some((other) => {
+    const farthestM = Math.max(1, planDistanceM(place, other.at));
+    return other !== machine && other.powerDba + 3 * other.walls - 20 * Math.log10(farthestM) > highestDb;
+  });
 }
 
 function everyDirection(): readonly number[] {
   return Array.from({ length: DIRECTIONS }, (_, index) => (360 * index) / DIRECTIONS);
 }
 
-/** The farthest place in one direction that holds, looked for from `fromM` inwards. */
+/** The farthest place in one direction that holds, looked for inwards until no place could be farther out than `toM`. */
 function farthestAlong(
   machine: WalledMachine,
   degrees: number,
-  fromM: number,
-  stepM: number,
+  { fromM, toM, stepM }: { readonly fromM: number; readonly toM: number; readonly stepM: number },
   leads: (place: Place) => boolean,
 ): Reach | undefined {
   const angle = (degrees * Math.PI) / 180;
   const [east, north] = [Math.sin(angle), Math.cos(angle)];
   const placeAt = (m: number): Place => ({ xM: machine.at.xM + m * east, yM: machine.at.yM + m * north });
-  for (let step = Math.ceil(fromM / stepM); step >= 0; step--) {
+  for (let step = Math.ceil(fromM / stepM); step >= 0 && (step + 1) * stepM >= toM; step--) {
     if (!leads(placeAt(step * stepM))) continue;
     const outM = halved(step * stepM, (step + 1) * stepM, (out) => leads(placeAt(out)));
     const at = placeAt(outM);
