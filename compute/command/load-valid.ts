@@ -34,7 +34,7 @@ export function loadValid(folder: string): Checked {
       return draft(content, project.project.id, phase, file, inputs);
     }),
   );
-  const mistakes = results.flatMap((result) => result.mistakes);
+  const mistakes = [...languagesWithoutWords(content), ...results.flatMap((result) => result.mistakes)];
   if (mistakes.length > 0) return { kind: "invalid", mistakes: sortMistakes(mistakes) };
   return { kind: "valid", content, drafts: results.flatMap((result) => result.draft ?? []) };
 }
@@ -57,4 +57,16 @@ function draft(
     const expected = `${error.field} within the range of its equation, ${error.expected}`;
     return { mistakes: [mistakeAt(content.texts, file, "", expected, show(error.received), error.advice)] };
   }
+}
+
+/** A project is published in its languages, so each needs the words that pages print. */
+function languagesWithoutWords(content: Content): readonly Mistake[] {
+  return [...content.projects.values()].flatMap(({ project, file }) =>
+    project.languages.flatMap((language, index) => {
+      if (content.wording.has(language)) return [];
+      const expected = `a language whose words are in content/wording: ${[...content.wording.keys()].map(show).join(", ") || "none yet"}`;
+      const advice = `Write content/wording/${language}.json, or take the language out.`;
+      return [mistakeAt(content.texts, file, `/languages/${index}`, expected, show(language), advice)];
+    }),
+  );
 }

@@ -33,6 +33,16 @@ describe("check", () => {
     expect(err).toMatch(/sheet-piling\/statement\.json:\d+:\d+ .*boundary/);
   });
 
+  test("names a language that has no words", async () => {
+    const { content, change } = contentCopy();
+    change("projects/saltpan-quay/project.json", '"languages": ["en"],', '"languages": ["en", "cy"],');
+    const { code, out, err } = await runInside("check", "--content", content);
+    expect([code, out]).toEqual([1, ""]);
+    expect(err).toMatch(
+      /project\.json:\d+:\d+ \/languages\/1: expected a language whose words are in content\/wording: "en", received "cy"\. Write content\/wording\/cy\.json, or take the language out\.\n/,
+    );
+  });
+
   test("names a folder that is not there", async () => {
     const { code, out, err } = await runInside("check", "--content", "no/such/folder");
     expect([code, out]).toEqual([1, ""]);
