@@ -1,4 +1,4 @@
-import { copyFileSync, mkdirSync, readdirSync, readFileSync, writeFileSync } from "node:fs";
+import { copyFileSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { createRequire } from "node:module";
 import path from "node:path";
 import { pathToFileURL } from "node:url";
@@ -30,10 +30,14 @@ async function writePages(site: Site, folder: string, place: Place): Promise<voi
   const output = path.relative(process.cwd(), folder);
   writeText(plan, JSON.stringify({ bundle: pathToFileURL(place.bundle).href, pages, models, output }));
   process.env.STILLBOARD_PLAN = plan;
-  const { default: Eleventy } = await import("@11ty/eleventy");
-  const engine = new Eleventy("templates", output, { configPath: ".eleventy.js", quietMode: true });
-  engine.disableLogger();
-  await engine.write();
+  try {
+    const { default: Eleventy } = await import("@11ty/eleventy");
+    const engine = new Eleventy("templates", output, { configPath: ".eleventy.js", quietMode: true });
+    engine.disableLogger();
+    await engine.write();
+  } finally {
+    rmSync(plan, { force: true });
+  }
 }
 
 function copyAssets(folder: string, root: string): void {
