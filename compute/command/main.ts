@@ -5,6 +5,7 @@ import { BrowserError } from "./browser.ts";
 import type { Command, Outcome, Place } from "./command.ts";
 import { commands } from "./commands.ts";
 import { OutputError } from "./fresh-folder.ts";
+import { RenderError } from "./render-error.ts";
 
 export { strict } from "../../templates/models/strict.ts";
 
@@ -17,17 +18,14 @@ export async function run(args: readonly string[], place: Place): Promise<number
   return print(await outcome(command, rest, place));
 }
 
+/** What the user can mend: sealed files, words, output folders, browsers. Anything else is our own fault and keeps its trace. */
+const MENDABLE = [RecordError, OutputError, WordError, RenderError, BrowserError];
+
 async function outcome(command: Command, args: readonly string[], place: Place): Promise<Outcome> {
   try {
     return await command.run(args, place);
   } catch (error) {
-    // Sealed files, words, output folders and browsers are for the user to mend; anything else is our own fault and keeps its trace.
-    if (
-      error instanceof RecordError ||
-      error instanceof OutputError ||
-      error instanceof WordError ||
-      error instanceof BrowserError
-    )
+    if (error instanceof Error && MENDABLE.some((kind) => error instanceof kind))
       return { code: 1, out: "", err: `${error.message}\n` };
     throw error;
   }

@@ -4,6 +4,7 @@ import path from "node:path";
 import { pathToFileURL } from "node:url";
 import type { Site } from "../../templates/models/site.ts";
 import type { Place } from "./command.ts";
+import { RenderError } from "./render-error.ts";
 
 /** Weights of the text face that the site ships. */
 const FONTS = ["source-sans-3-latin-400-normal.woff2", "source-sans-3-latin-600-normal.woff2"];
@@ -35,6 +36,8 @@ async function writePages(site: Site, folder: string, place: Place): Promise<voi
     const engine = new Eleventy("templates", output, { configPath: ".eleventy.js", quietMode: true });
     engine.disableLogger();
     await engine.write();
+  } catch (error) {
+    throw new RenderError(error);
   } finally {
     rmSync(plan, { force: true });
   }

@@ -69,6 +69,11 @@ const MISTAKES: readonly (readonly [string, (copy: ContentCopy) => void, RegExp]
     /content\/wording\/en\.json: expected the word "calculation\.title", received nothing\. Write every word that pages print\.\n$/,
   ],
   [
+    "a word that a template prints is missing",
+    ({ change }) => change("wording/en.json", '"lead": "Choose a project', '"leed": "Choose a project'),
+    /\nindex\.html\.w\.lead: the page model has no such key\. Write the word in content\/wording if it is one \(w, common\), else mend the template or its model\.\n$/,
+  ],
+  [
     "a link that leads nowhere",
     ({ content }) => writeFileSync(path.join(content, "method/zz-more.md"), "## More\n\nSee [there](nowhere.html).\n"),
     /calculation\/index\.html: expected a link to a file of the site, received "nowhere\.html"\nThe last site stays\.\n$/,
