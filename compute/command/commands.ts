@@ -1,7 +1,7 @@
 import { bench } from "./bench.ts";
 import { build } from "./build.ts";
 import { calc, calcHelp, calcSummary } from "./calc.ts";
-import { checkCommand } from "./check-command.ts";
+import { check } from "./check.ts";
 import type { Command } from "./command.ts";
 import { explain } from "./explain.ts";
 import { issue } from "./issue.ts";
@@ -10,7 +10,7 @@ import { command as types } from "./types.ts";
 
 /** Every command by name. */
 export const commands: Readonly<Record<string, Command>> = {
-  check: checkCommand,
+  check,
   build,
   issue,
   explain,

@@ -1,10 +1,9 @@
 import { describe, expect, test } from "vitest";
-import { check } from "../../compute/command/check.ts";
 import { loadContent } from "../../compute/documents/load-content.ts";
 import { mistakeAt } from "../../compute/documents/mistake-at.ts";
 import { mistakeText } from "../../compute/documents/mistake-text.ts";
 import { editedTexts, withFolder } from "./content-folder.ts";
-import { PROJECT, STATEMENT } from "./expect-mistake.ts";
+import { PROJECT } from "./expect-mistake.ts";
 
 describe("valid content", () => {
   test("is handed on by id, in the order of the ids", () => {
@@ -29,24 +28,6 @@ describe("valid content", () => {
       expect(content.texts.size).toBe(11);
       expect(content.texts.get(project?.file ?? "")).toBe(texts[PROJECT]);
     });
-  });
-
-  test("check says how many documents there are, or prints every mistake and how many", () => {
-    withFolder(editedTexts([]), (folder) => {
-      expect(check({ content: folder })).toEqual({ code: 0, out: "11 documents, no mistakes\n", err: "" });
-    });
-    withFolder(
-      editedTexts([
-        [PROJECT, "/groundLevelM", "two"],
-        [STATEMENT, "/shiftH", -1],
-      ]),
-      (folder) => {
-        const { code, out, err } = check({ content: folder });
-        expect({ code, out }).toEqual({ code: 1, out: "" });
-        expect(err.split("\n")).toHaveLength(4);
-        expect(err).toMatch(/\n2 mistakes in 2 files\n$/);
-      },
-    );
   });
 });
 
