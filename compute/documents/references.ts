@@ -44,7 +44,12 @@ export function references(set: DocumentSet): readonly Reference[] {
 function ofControl(control: Control, here: string): readonly Named[] {
   switch (control.kind) {
     case "screen":
-      return [[`${here}/panel`, "panel", control.panel]];
+      return [
+        [`${here}/panel`, "panel", control.panel],
+        ...(control.facing.kind === "absorptive"
+          ? [[`${here}/facing/sheet`, "lining", control.facing.sheet] as const]
+          : []),
+      ];
     case "enclosure":
       return [
         ...control.faces.map((face, index): Named => [`${here}/faces/${index}/panel`, "panel", face.panel]),

@@ -1,3 +1,4 @@
+import { totalM2 } from "../../geometry/surface.ts";
 import type { DocumentSet, Rule } from "../document-set.ts";
 import type { Mistake } from "../mistake.ts";
 import { mistakeAt } from "../mistake-at.ts";
@@ -16,8 +17,8 @@ export const enclosures: Rule = (set) =>
   );
 
 function ofEnclosure(set: DocumentSet, file: string, control: EnclosureControl, here: string): Mistake[] {
-  const facesM2 = total(control.faces);
-  const openM2 = total(control.openings);
+  const facesM2 = totalM2(control.faces);
+  const openM2 = totalM2(control.openings);
   const openPct = (100 * openM2) / (facesM2 + openM2);
   const found: Mistake[] = [];
   if (openPct > MOST_OPEN_PCT) {
@@ -49,8 +50,4 @@ function ofEnclosure(set: DocumentSet, file: string, control: EnclosureControl, 
     );
   }
   return found;
-}
-
-function total(parts: readonly { readonly areaM2: number }[]): number {
-  return parts.reduce((sum, part) => sum + part.areaM2, 0);
 }

@@ -32,6 +32,7 @@ function facades(set: DocumentSet, file: string, project: Project): Mistake[] {
 function phases(set: DocumentSet, id: string, file: string, project: Project): Mistake[] {
   const things = [
     ...project.buildings.map((building, index) => [`/buildings/${index}`, building] as const),
+    ...project.excavations.map((excavation, index) => [`/excavations/${index}`, excavation] as const),
     ...project.ground.areas.map((area, index) => [`/ground/areas/${index}`, area] as const),
   ];
   return things.flatMap(([pointer, thing]) => [

@@ -15,7 +15,7 @@ export const knownInStatement: Rule = (set) =>
 
 function ofControl(set: DocumentSet, placed: PlacedStatement, control: Control, here: string): readonly Mistake[] {
   const { file, projectId } = placed;
-  if (control.kind === "screen") {
+  if (control.kind === "screen" || control.kind === "bund") {
     return [
       ...knownPhase(set, projectId, file, `${here}/standsFrom`, control.standsFrom),
       ...knownPhase(set, projectId, file, `${here}/standsUntil`, control.standsUntil),

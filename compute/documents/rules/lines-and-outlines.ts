@@ -28,12 +28,13 @@ export const linesAndOutlines: Rule = (set) => {
     for (const [index, way] of sheet.publicWays.entries()) line(file, `/publicWays/${index}/line`, way.line);
     for (const [index, building] of sheet.buildings.entries())
       outline(file, `/buildings/${index}/outline`, building.outline);
+    for (const [index, pit] of sheet.excavations.entries()) outline(file, `/excavations/${index}/outline`, pit.outline);
     for (const [index, area] of sheet.ground.areas.entries())
       outline(file, `/ground/areas/${index}/outline`, area.outline);
   }
   for (const { file, statement } of statementsOf(set)) {
     for (const [index, control] of statement.controls.entries()) {
-      if (control.kind === "screen") line(file, `/controls/${index}/line`, control.line);
+      if (control.kind === "screen" || control.kind === "bund") line(file, `/controls/${index}/line`, control.line);
     }
   }
   return found;

@@ -8,10 +8,10 @@ import { type PlacedItem, plantItems } from "../plant-items.ts";
 import { type PlacedStatement, statementsOf } from "../statements-of.ts";
 import type { Building, Project } from "../types/project.gen.ts";
 
-/** Nearer than this, a machine would stand in the screen itself [m]. */
+/** Nearer than this, a machine would stand in the screen itself, or on the crest of the bund [m]. */
 const NEAREST_M = 0.1;
 
-/** No plant stands inside a building that stands while its activity runs, nor in a screen. */
+/** No plant stands inside a building that stands while its activity runs, nor in a screen or on a bund. */
 export const plantPlaces: Rule = (set) =>
   statementsOf(set).flatMap((placed) =>
     plantItems(placed.statement).flatMap((item) => [
@@ -45,7 +45,7 @@ function roofM(building: Building, project: Project): number {
 
 function inScreen(set: DocumentSet, { file, statement }: PlacedStatement, { item, pointer }: PlacedItem): Mistake[] {
   return statement.controls.flatMap((control) => {
-    if (control.kind !== "screen") return [];
+    if (control.kind !== "screen" && control.kind !== "bund") return [];
     const distanceM = distanceToLineM(item.at, control.line);
     if (distanceM > NEAREST_M) return [];
     const received = `${distanceM.toFixed(3)} m from "${control.id}"`;
@@ -54,9 +54,9 @@ function inScreen(set: DocumentSet, { file, statement }: PlacedStatement, { item
         set.texts,
         file,
         `${pointer}/at`,
-        `a place more than ${NEAREST_M} m from every screen`,
+        `a place more than ${NEAREST_M} m from every ${control.kind}`,
         received,
-        "Move the machine or the screen.",
+        `Move the machine or the ${control.kind}.`,
       ),
     ];
   });

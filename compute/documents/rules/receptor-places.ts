@@ -6,10 +6,10 @@ import { mistakeAt } from "../mistake-at.ts";
 import { type PlacedStatement, statementsOf } from "../statements-of.ts";
 import type { Project } from "../types/project.gen.ts";
 
-/** Nearer than this, a receptor point would stand in the screen itself [m]. */
+/** Nearer than this, a receptor point would stand in the screen itself, or on the crest of the bund [m]. */
 const NEAREST_M = 0.1;
 
-/** No receptor point lies inside a building or in a screen. */
+/** No receptor point lies inside a building, in a screen or on a bund. */
 export const receptorPlaces: Rule = (set) => [
   ...[...set.project.valid.values()].flatMap(({ sheet, file }) => insideBuildings(set, file, sheet)),
   ...statementsOf(set).flatMap((placed) => inScreens(set, placed)),
@@ -43,7 +43,7 @@ function insideBuildings(set: DocumentSet, file: string, project: Project): Mist
 function inScreens(set: DocumentSet, { file, statement, project }: PlacedStatement): Mistake[] {
   const points = (project?.receptors ?? []).flatMap((receptor) => receptor.points);
   return statement.controls.flatMap((control, index) => {
-    if (control.kind !== "screen") return [];
+    if (control.kind !== "screen" && control.kind !== "bund") return [];
     return points.flatMap((point) => {
       const distanceM = distanceToLineM(point.at, control.line);
       if (distanceM > NEAREST_M) return [];
@@ -56,7 +56,7 @@ function inScreens(set: DocumentSet, { file, statement, project }: PlacedStateme
           `/controls/${index}/line`,
           expected,
           received,
-          "Move the screen or the receptor point.",
+          `Move the ${control.kind} or the receptor point.`,
         ),
       ];
     });

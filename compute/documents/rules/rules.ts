@@ -14,10 +14,12 @@ import { languages } from "./languages.ts";
 import { limitPeriods } from "./limit-periods.ts";
 import { linesAndOutlines } from "./lines-and-outlines.ts";
 import { names } from "./names.ts";
+import { obstacleIds } from "./obstacle-ids.ts";
 import { operatorLevels } from "./operator-levels.ts";
 import { plantPlaces } from "./plant-places.ts";
 import { receptorPlaces } from "./receptor-places.ts";
 import { runningTimes } from "./running-times.ts";
+import { screenGaps } from "./screen-gaps.ts";
 import { screenPanels } from "./screen-panels.ts";
 import { standingOrder } from "./standing-order.ts";
 import { timeZones } from "./time-zones.ts";
@@ -28,6 +30,7 @@ import { windows } from "./windows.ts";
 export const rules: readonly Rule[] = [
   names,
   uniqueIds,
+  obstacleIds,
   knownSheets,
   knownInProject,
   knownInStatement,
@@ -45,6 +48,7 @@ export const rules: readonly Rule[] = [
   plantPlaces,
   receptorPlaces,
   screenPanels,
+  screenGaps,
   enclosures,
   emissionLevels,
   operatorLevels,

@@ -11,11 +11,14 @@ type Thing = { readonly standsFrom?: Stands; readonly standsUntil?: Stands };
 export const standingOrder: Rule = (set) => {
   const ofProjects = [...set.project.valid].flatMap(([id, { sheet, file }]) => [
     ...sheet.buildings.flatMap((building, index) => inOrder(set, id, file, `/buildings/${index}`, building)),
+    ...sheet.excavations.flatMap((pit, index) => inOrder(set, id, file, `/excavations/${index}`, pit)),
     ...sheet.ground.areas.flatMap((area, index) => inOrder(set, id, file, `/ground/areas/${index}`, area)),
   ]);
   const ofStatements = statementsOf(set).flatMap(({ projectId, file, statement }) =>
     statement.controls.flatMap((control, index) =>
-      control.kind === "screen" ? inOrder(set, projectId, file, `/controls/${index}`, control) : [],
+      control.kind === "screen" || control.kind === "bund"
+        ? inOrder(set, projectId, file, `/controls/${index}`, control)
+        : [],
     ),
   );
   return [...ofProjects, ...ofStatements];

@@ -64,6 +64,10 @@ export interface Project {
    * Buildings in and around the site.
    */
   buildings: Building[];
+  /**
+   * Excavations.
+   */
+  excavations: Excavation[];
   ground: Ground;
   /**
    * Places with people who should not be disturbed.
@@ -110,9 +114,9 @@ export interface Iso9613Method {
    */
   kind: "iso-9613-2-1996";
   /**
-   * Ground method: the general one of clause 7.3.1.
+   * Ground attenuation: the general method (7.3.1), or the alternative one (7.3.2, A-weighted levels over porous ground only).
    */
-  ground: "general";
+  ground: "general" | "alternative";
   /**
    * What a screen does to the ground effect of hard ground: "literal" takes equation (12) as printed, "conservative" does not credit the lost ground reflection twice.
    */
@@ -129,6 +133,14 @@ export interface Iso9613Method {
    * Air pressure for air absorption.
    */
   pressureKpa: number;
+  /**
+   * Whether first-order reflections from walls and screens are counted (7.5).
+   */
+  reflections: "first-order" | "none";
+  /**
+   * C0 of the meteorological correction (clause 8); 0 gives the downwind level, which is the cautious choice.
+   */
+  c0Db: number;
 }
 /**
  * A road, path or quay the public may use.
@@ -157,6 +169,24 @@ export interface Building {
    * Ground level here, metres above the project's own datum; where it is left out the project's groundLevelM holds.
    */
   groundM?: number;
+  standsFrom?: Stands;
+  standsUntil?: Stands;
+  /**
+   * What its walls reflect, as ISO 9613-2:1996, Table 4 sorts them: flat hard walls (ρ = 1), walls with windows and small additions (0.8), walls with half their area open or with installations (0.4), or none.
+   */
+  walls: "flat" | "with-windows" | "half-open" | "not-reflecting";
+}
+/**
+ * A pit whose edge screens what stands in it; its rim lies at the ground level around.
+ */
+export interface Excavation {
+  id: Id;
+  name: Text;
+  outline: Outline;
+  /**
+   * Level of the rim, metres above the project's own datum; where it is left out the project's groundLevelM holds.
+   */
+  rimM?: number;
   standsFrom?: Stands;
   standsUntil?: Stands;
 }

@@ -392,14 +392,15 @@ export interface SealedTerms {
    */
   planM: number;
   /**
-   * G of the source, middle and receptor regions.
+   * G of the source, middle and receptor regions; empty by the alternative ground method.
    *
-   * @minItems 3
    * @maxItems 3
    *
    * Items: Ground factor G.
    */
   groundFactors: number[];
+  directivityDb: Thousandth;
+  metDb: Thousandth;
   /**
    * Sound power. Whole thousandths, bands 63 Hz to 8 kHz in order.
    *
@@ -442,17 +443,20 @@ export interface SealedTerms {
  */
 export interface SealedPath {
   /**
-   * Straight, over the top edge, or round an end of a screen.
+   * Straight, over, round an end, through a screen, or reflected.
    */
-  path: "direct" | "over" | "left" | "right";
+  kind: "direct" | "over" | "left" | "right" | "left-then-over" | "right-then-over" | "through" | "reflected";
   /**
-   * Control id of the screen.
+   * Obstacles it bends over or round, the screen it goes through, or what reflects it first.
+   *
+   * Items: Id of a control, building or excavation.
    */
-  screen?: string;
+  past: string[];
   /**
    * Path-length difference z.
    */
   pathDifferenceM?: number;
+  own?: SealedOwnLine;
   /**
    * Screen attenuation Abar. Whole thousandths, bands 63 Hz to 8 kHz in order.
    *
@@ -461,12 +465,12 @@ export interface SealedPath {
    */
   screenDb: Thousandth[];
   /**
-   * Taken off so that the paths together stay at the unscreened level. Whole thousandths, bands 63 Hz to 8 kHz in order.
+   * Taken off so that the paths of a line together stay at its unscreened level; absent where nothing is. Whole thousandths, bands 63 Hz to 8 kHz in order.
    *
    * @minItems 8
    * @maxItems 8
    */
-  capDb: Thousandth[];
+  capDb?: Thousandth[];
   /**
    * Level of the path. Whole thousandths, bands 63 Hz to 8 kHz in order.
    *
@@ -474,6 +478,38 @@ export interface SealedPath {
    * @maxItems 8
    */
   levelDb: Thousandth[];
+}
+/**
+ * Terms of a reflected line, which is longer than the straight one.
+ */
+export interface SealedOwnLine {
+  /**
+   * Distance along the reflected line.
+   */
+  distanceM: number;
+  directivityDb: Thousandth;
+  divergenceDb: Thousandth;
+  /**
+   * Air absorption Aatm. Whole thousandths, bands 63 Hz to 8 kHz in order.
+   *
+   * @minItems 8
+   * @maxItems 8
+   */
+  airDb: Thousandth[];
+  /**
+   * Ground Agr. Whole thousandths, bands 63 Hz to 8 kHz in order.
+   *
+   * @minItems 8
+   * @maxItems 8
+   */
+  groundDb: Thousandth[];
+  /**
+   * What the surface takes; 300 dB in a band in which the reflection does not count. Whole thousandths, bands 63 Hz to 8 kHz in order.
+   *
+   * @minItems 8
+   * @maxItems 8
+   */
+  reflectionDb: Thousandth[];
 }
 /**
  * The source and path that decide at a receptor point, worked out step by step.
@@ -496,9 +532,9 @@ export interface SealedGoverning {
    */
   item: string;
   /**
-   * Its path with the largest part.
+   * Its path with the largest part, counted from 0 in the term table.
    */
-  path: "direct" | "over" | "left" | "right";
+  path: number;
   /**
    * Octave band with the largest part.
    */

@@ -12,11 +12,16 @@ export type Setting = OpenSetting | TrenchSetting | RoomSetting | TunnelSetting 
 /**
  * Whatever reduces noise.
  */
-export type Control = ScreenControl | EnclosureControl | QuieterPlantControl | RunningTimeControl | PracticeControl;
+export type Control =
+  ScreenControl | BundControl | EnclosureControl | QuieterPlantControl | RunningTimeControl | PracticeControl;
 /**
  * Whether the control is part of the statement.
  */
 export type ControlState = AdoptedState | OfferedState | RejectedState;
+/**
+ * What the side of a screen towards the plant does with sound.
+ */
+export type Facing = ReflectiveFacing | AbsorptiveFacing;
 /**
  * What the zone passes.
  */
@@ -232,6 +237,15 @@ export interface ScreenControl {
   panel: Id;
   standsFrom: Stands;
   standsUntil?: Stands;
+  /**
+   * Taken off the panel's sound reduction index for joints made on site.
+   */
+  siteBuildDeductionDb: number;
+  /**
+   * Openings under and between the panels; an empty list states that there are none.
+   */
+  gaps: ScreenGap[];
+  facing: Facing;
 }
 /**
  * Part of the statement; figures count it.
@@ -260,6 +274,61 @@ export interface RejectedState {
    */
   kind: "rejected";
   reason: Text;
+}
+/**
+ * An opening in a screen; sound passes it without loss.
+ */
+export interface ScreenGap {
+  id: Id;
+  /**
+   * Area of the gap.
+   */
+  areaM2: number;
+}
+/**
+ * A hard side that throws sound back.
+ */
+export interface ReflectiveFacing {
+  /**
+   * Names the variant.
+   */
+  kind: "reflective";
+}
+/**
+ * A side with a lining.
+ */
+export interface AbsorptiveFacing {
+  /**
+   * Names the variant.
+   */
+  kind: "absorptive";
+  sheet: Id;
+}
+/**
+ * A bank of earth or spoil along a line, its crest level.
+ */
+export interface BundControl {
+  /**
+   * Names the variant.
+   */
+  kind: "bund";
+  id: Id;
+  name: Text;
+  state: ControlState;
+  by: Text;
+  due: PlainDate;
+  checkedBy: Text;
+  line: Line;
+  /**
+   * Height of the crest above the ground here.
+   */
+  heightM: number;
+  /**
+   * Ground level here, metres above the project's own datum; where it is left out the project's groundLevelM holds.
+   */
+  groundM?: number;
+  standsFrom: Stands;
+  standsUntil?: Stands;
 }
 /**
  * A full enclosure around plant.
