@@ -1,5 +1,5 @@
 /** Any level or band level. Behind long air paths levels lie far below hearing; the lower end keeps their energy above zero. */
-export const anyLevel = { unit: "dB", min: -1000, max: 200 } as const;
+export const anyLevel = { unit: "dB", min: -1500, max: 200 } as const;
 
 /** Levels at a work place. */
 export const exposureLevel = { unit: "dB", min: 0, max: 140 } as const;

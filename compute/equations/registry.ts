@@ -49,8 +49,11 @@ import { groundEffect } from "./propagation/ground-effect.ts";
 import { groundEffectAlternative } from "./propagation/ground-effect-alternative.ts";
 import { groundFactor } from "./propagation/ground-factor.ts";
 import { metCorrection } from "./propagation/met-correction.ts";
+import { metLevel } from "./propagation/met-level.ts";
 import { octaveLevel } from "./propagation/octave-level.ts";
 import { solidAngleIndex } from "./propagation/solid-angle-index.ts";
+import { leastReflector } from "./reflections/least-reflector.ts";
+import { reflectedPower } from "./reflections/reflected-power.ts";
 import { doubleEdgeFactor } from "./screens/double-edge-factor.ts";
 import { edgesCombined } from "./screens/edges-combined.ts";
 import { fresnelNumber } from "./screens/fresnel-number.ts";
@@ -116,8 +119,11 @@ export const equations = {
   "ground-effect": groundEffect,
   "ground-factor": groundFactor,
   "met-correction": metCorrection,
+  "met-level": metLevel,
   "octave-level": octaveLevel,
   "solid-angle-index": solidAngleIndex,
+  "least-reflector": leastReflector,
+  "reflected-power": reflectedPower,
   "double-edge-factor": doubleEdgeFactor,
   "edges-combined": edgesCombined,
   "fresnel-number": fresnelNumber,

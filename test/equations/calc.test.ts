@@ -80,7 +80,7 @@ describe("calc refuses in one line", () => {
     ],
     [
       ["sum-levels"],
-      "calc sum-levels: levelsDb: expected a list, each a number from -1000 to 200 dB, received nothing",
+      "calc sum-levels: levelsDb: expected a list, each a number from -1500 to 200 dB, received nothing",
     ],
     [
       ["wearing-time", "protectionDb=30"],

@@ -14,7 +14,7 @@ export const octaveLevel = equation({
     divergenceDb: { kind: "one", symbol: String.raw`A_{\text{div}}`, unit: "dB", min: -100, max: 100 },
     airDb: { kind: "one", symbol: String.raw`A_{\text{atm}}`, unit: "dB", min: 0, max: 10000 },
     groundDb: { kind: "one", symbol: String.raw`A_{\text{gr}}`, unit: "dB", min: -20, max: 40 },
-    screenDb: { kind: "one", symbol: String.raw`A_{\text{bar}}`, unit: "dB", min: 0, max: 50 },
+    screenDb: { kind: "one", symbol: String.raw`A_{\text{bar}}`, unit: "dB", min: 0, max: 300 },
   },
   source: { document: "ISO 9613-2", edition: "1996", clause: "6, eqs. (3) and (4)", checked: "read-secondary" },
   work: ({ powerDb, controlLossDb, directivityDb, divergenceDb, airDb, groundDb, screenDb }) =>

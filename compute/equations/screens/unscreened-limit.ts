@@ -1,3 +1,4 @@
+import { anyLevel } from "../common-ranges.ts";
 import { equation } from "../equation.ts";
 
 /** Level of one path past a screen, lowered with its fellows so that together they never exceed the unscreened level. */
@@ -8,9 +9,9 @@ export const unscreenedLimit = equation({
   tex: String.raw`L' = L - \max\left(0,\; 10 \lg \sum_{i=1}^{n} 10^{0.1 L_i} - L_0\right)`,
   value: { symbol: "L'", unit: "dB", decimals: 1 },
   inputs: {
-    levelDb: { kind: "one", symbol: "L", unit: "dB", min: -300, max: 200, decimals: 1 },
-    pathLevelsDb: { kind: "many", symbol: "L_i", unit: "dB", min: -300, max: 200, decimals: 1 },
-    unscreenedDb: { kind: "one", symbol: "L_0", unit: "dB", min: -300, max: 200, decimals: 1 },
+    levelDb: { kind: "one", symbol: "L", ...anyLevel, decimals: 1 },
+    pathLevelsDb: { kind: "many", symbol: "L_i", ...anyLevel, decimals: 1 },
+    unscreenedDb: { kind: "one", symbol: "L_0", ...anyLevel, decimals: 1 },
   },
   source: {
     document: "ISO 9613-2",
