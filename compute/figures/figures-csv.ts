@@ -1,6 +1,7 @@
 import { stringify } from "csv-stringify/sync";
 import { A_WEIGHTS_DB, BANDS_HZ } from "../acoustics/bands.ts";
 import type { Revision, SealedPeriod, SealedTerms } from "../documents/types/revision.gen.ts";
+import { resolvedPath } from "./resolved-path.ts";
 
 /** Columns of figures.csv, in order. */
 export const CSV_COLUMNS = [
@@ -11,9 +12,13 @@ export const CSV_COLUMNS = [
   "activity",
   "item",
   "path",
+  "past",
+  "distance_m",
   "band_hz",
   "sound_power_db",
   "control_loss_db",
+  "reflection_db",
+  "directivity_db",
   "divergence_db",
   "air_db",
   "ground_db",
@@ -21,6 +26,7 @@ export const CSV_COLUMNS = [
   "cap_db",
   "path_level_db",
   "a_weight_db",
+  "met_db",
   "on_time_pct",
   "window_h",
   "period_h",
@@ -33,7 +39,8 @@ type Row = Partial<Record<(typeof CSV_COLUMNS)[number], string | number>>;
 /**
  * figures.csv of a revision: a row per figure, and under each level of a limit's period a row per source, path and band with
  * every term in its own column, so that a spreadsheet can redo the sum:
- * value = 10 lg Σ share · 10^((path_level_db + a_weight_db)/10) + facade_db.
+ * path_level_db = sound_power_db − control_loss_db − reflection_db + directivity_db − divergence_db − air_db − ground_db
+ * − screen_db − cap_db; value = 10 lg Σ share · 10^((path_level_db + a_weight_db − met_db)/10) + facade_db.
  */
 export function figuresCsv(revision: Revision): string {
   const figures = revision.figures.map(({ key, value, unit }): Row => ({ row: "figure", figure: key, value, unit }));
@@ -69,22 +76,28 @@ function periodRows(revision: Revision, period: SealedPeriod): readonly Row[] {
 
 function termRows(terms: SealedTerms, common: Row): readonly Row[] {
   const db = (list: readonly number[], band: number) => (list[band] ?? Number.NaN) / 1000;
-  return terms.paths.flatMap((path) =>
-    BANDS_HZ.map(
+  return terms.paths.flatMap((path, index) => {
+    const resolved = resolvedPath(terms, path);
+    return BANDS_HZ.map(
       (bandHz, band): Row => ({
         ...common,
-        path: path.screen ? `${path.path}:${path.screen}` : path.path,
+        path: `${index + 1} ${path.kind}`,
+        past: path.past.join(" "),
+        distance_m: resolved.distanceM,
         band_hz: bandHz,
         sound_power_db: db(terms.powerDb, band),
         control_loss_db: db(terms.controlLossDb, band),
-        divergence_db: terms.divergenceDb / 1000,
-        air_db: db(terms.airDb, band),
-        ground_db: db(terms.groundDb, band),
-        screen_db: db(path.screenDb, band),
-        cap_db: db(path.capDb, band),
-        path_level_db: db(path.levelDb, band),
+        reflection_db: db(resolved.reflectionDb, band),
+        directivity_db: resolved.directivityDb / 1000,
+        divergence_db: resolved.divergenceDb / 1000,
+        air_db: db(resolved.airDb, band),
+        ground_db: db(resolved.groundDb, band),
+        screen_db: db(resolved.screenDb, band),
+        cap_db: db(resolved.capDb, band),
+        path_level_db: db(resolved.levelDb, band),
         a_weight_db: A_WEIGHTS_DB[bandHz],
+        met_db: terms.metDb / 1000,
       }),
-    ),
-  );
+    );
+  });
 }

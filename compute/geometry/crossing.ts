@@ -28,3 +28,8 @@ export function crossing(a: Place, b: Place, c: Place, d: Place): Crossing | und
   const within = onFirst >= -tieFirst && onFirst <= 1 + tieFirst && onSecond >= -tieSecond && onSecond <= 1 + tieSecond;
   return within ? { onFirst, onSecond } : undefined;
 }
+
+/** Whether a crossing lies on the second segment between its ends, the ends themselves left out. */
+export function isBetweenEnds({ onSecond }: Crossing): boolean {
+  return onSecond > 0 && onSecond < 1;
+}

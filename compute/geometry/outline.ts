@@ -16,6 +16,11 @@ export function sides(outline: readonly Place[]): readonly Side[] {
   return made;
 }
 
+/** Above 0 for an outline given anticlockwise, below 0 for one given clockwise: twice its area [m²]. */
+export function orientation(outline: readonly Place[]): number {
+  return sides(outline).reduce((sum, [a, b]) => sum + (a.xM * b.yM - b.xM * a.yM), 0);
+}
+
 /** Whether a position lies inside a closed outline (even-odd rule). */
 export function isInside(place: Place, outline: readonly Place[]): boolean {
   let inside = false;

@@ -29,7 +29,9 @@ export function documentsUsed(
   const items = used.flatMap(({ activity }) => activity.plant.map((item) => item.id));
   const controls = statement.controls.flatMap((control, index) => {
     const acts =
-      control.kind === "screen" || ("appliesTo" in control && control.appliesTo.some((id) => items.includes(id)));
+      control.kind === "screen" ||
+      control.kind === "bund" ||
+      ("appliesTo" in control && control.appliesTo.some((id) => items.includes(id)));
     return acts && control.state.kind === "adopted" ? [{ control, index }] : [];
   });
   const named = [
@@ -55,7 +57,10 @@ export function documentsUsed(
 function sheetsOf(control: StatementInputs["statement"]["controls"][number]): readonly string[] {
   switch (control.kind) {
     case "screen":
-      return [`panels/${control.panel}`];
+      return [
+        `panels/${control.panel}`,
+        ...(control.facing.kind === "absorptive" ? [`linings/${control.facing.sheet}`] : []),
+      ];
     case "quieter-plant":
       return [`plant/${control.insteadOf}`];
     case "enclosure":

@@ -1,6 +1,8 @@
 import type { Bands } from "../acoustics/bands.ts";
 import { inOrder } from "../acoustics/bands.ts";
-import type { Revision, SealedFigure, SealedTerms } from "../documents/types/revision.gen.ts";
+import type { PathTerms } from "../acoustics/path-terms.ts";
+import type { Revision, SealedFigure, SealedPath, SealedTerms } from "../documents/types/revision.gen.ts";
+import { resolvedPath } from "../figures/resolved-path.ts";
 import type { ItemLevel } from "../statement/assess.ts";
 import type { Recomputed } from "./recompute.ts";
 
@@ -29,27 +31,30 @@ export function termDifferenceDb(
   return Math.max(0, ...differences);
 }
 
-function tableDifferenceDb(stored: SealedTerms, { item, propagation, levelDba }: ItemLevel): number {
+function tableDifferenceDb(stored: SealedTerms, { item, propagation, levelDba, metDb }: ItemLevel): number {
   const { paths } = propagation;
   if (paths.length !== stored.paths.length) return MISSING_DB;
-  const [first] = paths;
-  if (!first) return MISSING_DB;
   return Math.max(
     listDifferenceDb(stored.powerDb, item.source.powerDb),
     listDifferenceDb(stored.controlLossDb, item.source.controlLossDb),
-    Math.abs(stored.divergenceDb / 1000 - first.divergenceDb),
-    listDifferenceDb(stored.airDb, first.airDb),
-    listDifferenceDb(stored.groundDb, first.groundDb),
+    Math.abs(stored.metDb / 1000 - metDb),
     Math.abs(stored.levelDba / 1000 - levelDba),
-    ...paths.map((path, index) => {
-      const kept = stored.paths[index];
-      if (!kept || kept.path !== path.path) return MISSING_DB;
-      return Math.max(
-        listDifferenceDb(kept.screenDb, path.screenDb),
-        listDifferenceDb(kept.capDb, path.capDb),
-        listDifferenceDb(kept.levelDb, path.levelDb),
-      );
-    }),
+    ...paths.map((path, index) => pathDifferenceDb(stored, stored.paths[index], path)),
+  );
+}
+
+function pathDifferenceDb(stored: SealedTerms, kept: SealedPath | undefined, path: PathTerms): number {
+  if (!kept || kept.kind !== path.kind || kept.past.join() !== path.past.join()) return MISSING_DB;
+  const resolved = resolvedPath(stored, kept);
+  return Math.max(
+    Math.abs(resolved.divergenceDb / 1000 - path.divergenceDb),
+    Math.abs(resolved.directivityDb / 1000 - path.directivityDb),
+    listDifferenceDb(resolved.airDb, path.airDb),
+    listDifferenceDb(resolved.groundDb, path.groundDb),
+    listDifferenceDb(resolved.reflectionDb, path.reflectionDb),
+    listDifferenceDb(resolved.screenDb, path.screenDb),
+    listDifferenceDb(resolved.capDb, path.capDb),
+    listDifferenceDb(resolved.levelDb, path.levelDb),
   );
 }
 

@@ -11,6 +11,8 @@ export interface ItemLevel {
   readonly item: SceneItem;
   readonly propagation: Propagation;
   readonly levelDba: number;
+  /** Meteorological correction taken off [dB]. */
+  readonly metDb: number;
 }
 
 /** Levels while running for one subset of the controls. */
@@ -61,14 +63,15 @@ export function assess(
   };
 }
 
-function itemLevel(working: Working, activity: SceneActivity, item: SceneItem, point: ScenePoint): ItemLevel {
-  const propagation = propagate(working, activity.site, item.source, point.point);
-  return { item, propagation, levelDba: sumOfPaths(working, propagation.paths) };
+function itemLevel(working: Working, activity: SceneActivity, item: SceneItem, { point }: ScenePoint): ItemLevel {
+  const propagation = propagate(working, activity.site, item.source, point);
+  const { paths, planM } = propagation;
+  return { item, propagation, ...sumOfPaths(working, activity.site, paths, item.source, point, planM) };
 }
 
 function cacheKey(activity: SceneActivity, item: SceneItem, point: ScenePoint): string {
-  const screens = activity.site.screens.map((screen) => screen.id);
-  return JSON.stringify([activity.id, item.id, point.id, item.sheet, screens, item.controls]);
+  const obstacles = activity.site.obstacles.map(({ id }) => id);
+  return JSON.stringify([activity.id, item.id, point.id, item.sheet, obstacles, item.controls]);
 }
 
 function found<T extends { readonly id: string }>(list: readonly T[], id: string): T {

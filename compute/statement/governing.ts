@@ -1,6 +1,6 @@
 import type { BandHz } from "../acoustics/bands.ts";
 import { A_WEIGHTS_DB, BANDS_HZ } from "../acoustics/bands.ts";
-import type { PathTerms } from "../acoustics/propagate.ts";
+import type { PathTerms } from "../acoustics/path-terms.ts";
 import type { Step } from "../equations/working.ts";
 import { belongsTo, recording, silently } from "../equations/working.ts";
 import type { ItemLevel } from "./assess.ts";
@@ -17,7 +17,8 @@ export interface Governing {
   readonly rule: string;
   readonly activity: string;
   readonly item: string;
-  readonly path: PathTerms["path"];
+  /** Index of the path in the term table. */
+  readonly path: number;
   readonly bandHz: BandHz;
   readonly steps: readonly Step[];
 }
@@ -52,9 +53,16 @@ function governingAt(inputs: StatementInputs, period: PeriodFigure): Governing {
   assessment.itemLevels(activity, period.point);
   periodLevel(working, inputs, assessment, ref, period.point);
   const { path, bandHz } = loudestPath(level);
-  const subject = { activity, item: level.item.id, path, band: String(bandHz), day: period.date };
-  const kept = steps.filter((step) => belongsTo(step, subject));
+  const governs = level.propagation.paths[path] as PathTerms;
+  const { line, name } = governs;
+  const subject = { activity, item: level.item.id, line, path: name, band: String(bandHz), day: period.date };
+  const kept = steps.filter((step) => belongsTo(step, subject) && isPassed(step, governs));
   return { point: period.point, rule: period.rule, activity, item: level.item.id, path, bandHz, steps: kept };
+}
+
+/** The sound reduction of a screen belongs to the chain only where the path goes through it. */
+function isPassed(step: Step, { kind, past }: PathTerms): boolean {
+  return step.term !== "screen-index" || (kind === "through" && step.at.includes(`control:${past[0]}`));
 }
 
 /** The item with the largest part in a period level, each at the share of time that counted in it. */
@@ -68,9 +76,9 @@ function loudestItem(inputs: StatementInputs, period: PeriodFigure): { activity:
   return { activity: loudest.activity, level };
 }
 
-function loudestPath({ propagation }: ItemLevel): { path: PathTerms["path"]; bandHz: BandHz } {
-  const parts = propagation.paths.flatMap((path) =>
-    BANDS_HZ.map((bandHz) => ({ path: path.path, bandHz, partDb: path.levelDb[bandHz] + A_WEIGHTS_DB[bandHz] })),
+function loudestPath({ propagation }: ItemLevel): { path: number; bandHz: BandHz } {
+  const parts = propagation.paths.flatMap((terms, path) =>
+    BANDS_HZ.map((bandHz) => ({ path, bandHz, partDb: terms.levelDb[bandHz] + A_WEIGHTS_DB[bandHz] })),
   );
   return parts.reduce((kept, next) => (kept.partDb >= next.partDb ? kept : next));
 }

@@ -26,14 +26,7 @@ export function inputsOf(content: Content, project: ProjectEntry, phase: string)
     ),
     plant: pick(content.plant, plant),
     panels: pick(content.panels, controls.flatMap(panelsUsed)),
-    linings: pick(
-      content.linings,
-      enclosures.flatMap(({ lining, floor, unlinedSheet }) => [
-        lining.sheet,
-        floor.sheet,
-        ...(unlinedSheet ? [unlinedSheet] : []),
-      ]),
-    ),
+    linings: pick(content.linings, controls.flatMap(liningsUsed)),
     silencers: pick(
       content.silencers,
       enclosures.flatMap(({ openings }) => openings.flatMap((opening) => opening.silencer ?? [])),
@@ -55,6 +48,13 @@ function plantUsed(content: Content, used: readonly string[]): readonly string[]
 function panelsUsed(control: Control): readonly string[] {
   if (control.kind === "screen") return [control.panel];
   return control.kind === "enclosure" ? control.faces.map((face) => face.panel) : [];
+}
+
+function liningsUsed(control: Control): readonly string[] {
+  if (control.kind === "screen") return control.facing.kind === "absorptive" ? [control.facing.sheet] : [];
+  if (control.kind !== "enclosure") return [];
+  const { lining, floor, unlinedSheet } = control;
+  return [lining.sheet, floor.sheet, ...(unlinedSheet ? [unlinedSheet] : [])];
 }
 
 function pick<T>(from: ReadonlyMap<string, Entry<T>>, ids: readonly string[]): Readonly<Record<string, T>> {

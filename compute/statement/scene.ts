@@ -1,15 +1,17 @@
 import type { Bands } from "../acoustics/bands.ts";
 import { perBand } from "../acoustics/bands.ts";
 import { enclosureInsertionLoss } from "../acoustics/enclosure.ts";
-import type { PointSource } from "../acoustics/propagate.ts";
-import type { Point, Site } from "../acoustics/site.ts";
+import type { PointSource, Receptor } from "../acoustics/propagate.ts";
+import type { Site } from "../acoustics/site.ts";
 import { soundPower } from "../acoustics/sound-power.ts";
 import type { Activity, Control, EnclosureControl, PlantItem } from "../documents/types/statement.gen.ts";
 import type { Working } from "../equations/working.ts";
 import { emissionOf } from "./emission-of.ts";
 import { enclosureOf } from "./enclosure-of.ts";
+import { facetsOf } from "./facets-of.ts";
 import type { StatementInputs } from "./inputs.ts";
 import { entry } from "./inputs.ts";
+import { obstaclesOf } from "./obstacles-of.ts";
 import { standsThroughout } from "./stands.ts";
 
 /** A plant item as it runs in an activity with the controls that are in place. */
@@ -37,7 +39,7 @@ export interface ScenePoint {
   /** `<receptor>.<point>` */
   readonly id: string;
   readonly receptor: string;
-  readonly point: Point;
+  readonly point: Receptor;
 }
 
 export interface Scene {
@@ -61,7 +63,12 @@ export function scene(working: Working, inputs: StatementInputs, controlIds: Rea
       receptor.points.map((point) => ({
         id: `${receptor.id}.${point.id}`,
         receptor: receptor.id,
-        point: { at: point.at, groundM: point.groundM ?? inputs.project.groundLevelM, heightM: point.heightM },
+        point: {
+          at: point.at,
+          groundM: point.groundM ?? inputs.project.groundLevelM,
+          heightM: point.heightM,
+          facadeOf: point.position.kind === "facade" ? point.position.building : undefined,
+        },
       })),
     ),
   };
@@ -69,7 +76,8 @@ export function scene(working: Working, inputs: StatementInputs, controlIds: Rea
 
 /** Whether a control is there on every day of the activity; one that is put up or struck meanwhile does not count. */
 function inPlace(inputs: StatementInputs, control: Control, activity: Activity): boolean {
-  if (control.kind === "screen") return standsThroughout(inputs, control, activity.from, activity.until);
+  if (control.kind === "screen" || control.kind === "bund")
+    return standsThroughout(inputs, control, activity.from, activity.until);
   return control.due <= activity.from;
 }
 
@@ -92,14 +100,13 @@ function sceneActivity(
         pressureKpa: project.method.pressureKpa,
       },
       ground: { elsewhere: project.ground.elsewhere.groundFactor, areas },
-      screens: there
-        .filter((control) => control.kind === "screen")
-        .map((screen) => ({
-          id: screen.id,
-          line: screen.line,
-          topM: (screen.groundM ?? project.groundLevelM) + screen.heightM,
-        })),
-      screenOverHardGround: project.method.screenOverHardGround,
+      obstacles: obstaclesOf(working.at(`activity:${activity.id}`), inputs, there, activity),
+      facets: project.method.reflections === "none" ? [] : facetsOf(inputs, there, activity),
+      method: {
+        ground: project.method.ground,
+        screenOverHardGround: project.method.screenOverHardGround,
+        c0Db: project.method.c0Db,
+      },
     },
     items: activity.plant.map((item) =>
       sceneItem(working.at(`activity:${activity.id}`, `item:${item.id}`), inputs, there, item),

@@ -1,17 +1,29 @@
 import { BANDS_HZ, type Bands } from "../acoustics/bands.ts";
+import type { PathTerms } from "../acoustics/path-terms.ts";
 import type { Assessment, ItemLevel } from "./assess.ts";
 
 /** One value per octave band in whole thousandths of a decibel, in the order of the bands. */
 export type Thousandths = readonly number[];
 
+/** The terms of a reflected line, which differ from those of the straight one. */
+export interface OwnLine {
+  readonly distanceM: number;
+  readonly directivityDb: number;
+  readonly divergenceDb: number;
+  readonly airDb: Thousandths;
+  readonly groundDb: Thousandths;
+  readonly reflectionDb: Thousandths;
+}
+
 /** The terms of one path: what is particular to it. */
 export interface PathTable {
-  readonly path: "direct" | "over" | "left" | "right";
-  /** Control id of the screen; absent on the direct path. */
-  readonly screen?: string;
+  readonly kind: PathTerms["kind"];
+  readonly past: readonly string[];
   readonly pathDifferenceM?: number;
+  readonly own?: OwnLine;
   readonly screenDb: Thousandths;
-  readonly capDb: Thousandths;
+  /** Absent where nothing is taken off. */
+  readonly capDb?: Thousandths;
   readonly levelDb: Thousandths;
 }
 
@@ -23,7 +35,10 @@ export interface TermTable {
   readonly onTimePct: number;
   readonly distanceM: number;
   readonly planM: number;
-  readonly groundFactors: readonly [source: number, middle: number, receptor: number];
+  /** G of the source, middle and receptor regions; empty by the alternative ground method. */
+  readonly groundFactors: readonly number[];
+  readonly directivityDb: number;
+  readonly metDb: number;
   readonly powerDb: Thousandths;
   readonly controlLossDb: Thousandths;
   /** The same in every band. */
@@ -45,8 +60,8 @@ export function termTables(assessment: Assessment): readonly TermTable[] {
   );
 }
 
-function termTable(activity: string, point: string, { item, propagation, levelDba }: ItemLevel): TermTable {
-  const { distanceM, planM, groundFactors, paths } = propagation;
+function termTable(activity: string, point: string, { item, propagation, levelDba, metDb }: ItemLevel): TermTable {
+  const { distanceM, planM, groundFactors: factors, paths } = propagation;
   const [first] = paths;
   if (!first) throw new Error(`${activity}/${item.id}/${point}: no path`);
   return {
@@ -56,21 +71,40 @@ function termTable(activity: string, point: string, { item, propagation, levelDb
     onTimePct: item.onTimePct,
     distanceM,
     planM,
-    groundFactors: [groundFactors.source, groundFactors.middle, groundFactors.receptor],
+    groundFactors: factors ? [factors.source, factors.middle, factors.receptor] : [],
+    directivityDb: thousandth(first.directivityDb),
+    metDb: thousandth(metDb),
     powerDb: thousandths(item.source.powerDb),
     controlLossDb: thousandths(item.source.controlLossDb),
     divergenceDb: thousandth(first.divergenceDb),
     airDb: thousandths(first.airDb),
     groundDb: thousandths(first.groundDb),
-    paths: paths.map((path) => ({
-      path: path.path,
-      ...(path.screen === undefined ? {} : { screen: path.screen }),
-      ...(path.pathDifferenceM === undefined ? {} : { pathDifferenceM: path.pathDifferenceM }),
-      screenDb: thousandths(path.screenDb),
-      capDb: thousandths(path.capDb),
-      levelDb: thousandths(path.levelDb),
-    })),
+    paths: paths.map(pathTable),
     levelDba: thousandth(levelDba),
+  };
+}
+
+function pathTable(path: PathTerms): PathTable {
+  const capDb = thousandths(path.capDb);
+  return {
+    kind: path.kind,
+    past: path.past,
+    ...(path.pathDifferenceM === undefined ? {} : { pathDifferenceM: path.pathDifferenceM }),
+    ...(path.kind === "reflected" ? { own: ownLine(path) } : {}),
+    screenDb: thousandths(path.screenDb),
+    ...(capDb.some((value) => value !== 0) ? { capDb } : {}),
+    levelDb: thousandths(path.levelDb),
+  };
+}
+
+function ownLine(path: PathTerms): OwnLine {
+  return {
+    distanceM: path.distanceM,
+    directivityDb: thousandth(path.directivityDb),
+    divergenceDb: thousandth(path.divergenceDb),
+    airDb: thousandths(path.airDb),
+    groundDb: thousandths(path.groundDb),
+    reflectionDb: thousandths(path.reflectionDb),
   };
 }
 

@@ -6,7 +6,14 @@ import type { PlantItem } from "../documents/types/statement.gen.ts";
 import { InputError } from "../equations/input-error.ts";
 import type { Working } from "../equations/working.ts";
 import { crossing } from "../geometry/crossing.ts";
-import { distanceToOutlineM, distanceToSegmentM, rectangle, sides } from "../geometry/outline.ts";
+import {
+  distanceToOutlineM,
+  distanceToSegmentM,
+  isInside,
+  orientation,
+  rectangle,
+  sides,
+} from "../geometry/outline.ts";
 import type { Place } from "../geometry/place.ts";
 import { planDistanceM, side } from "../geometry/place.ts";
 import type { ZoneMachine } from "../hearing/zone-machine.ts";
@@ -66,15 +73,18 @@ function enclosureNamed(inputs: StatementInputs, item: SceneItem): boolean {
 
 type Wall = readonly [Place, Place];
 
-/** Walls of buildings that face a machine, and the straight runs of screens that stand; each building and screen counts at least once. */
+/** Walls of buildings that face a machine, straight runs of screens and bunds, sides of the pit it stands in; each counts at least once. */
 function reflecting(inputs: StatementInputs, activity: SceneActivity, at: Place): readonly Wall[] {
   const faces = inputs.project.buildings.map((building) =>
     sides(building.outline).filter(([a, b]) => side(a, b, at) * orientation(building.outline) < 0),
   );
-  const runs = activity.site.screens.map((screen) =>
-    screen.line.slice(1).map((to, index) => [screen.line[index] as Place, to] as const),
-  );
-  return [...faces, ...runs].flatMap((walls) => squareTo(walls, at));
+  const runs = activity.site.obstacles
+    .filter(({ kind }) => kind === "screen" || kind === "bund")
+    .map(({ edges }) => edges.map(([from, to]): Wall => [from, to]));
+  const pits = inputs.project.excavations
+    .filter(({ outline }) => isInside(at, outline))
+    .map(({ outline }) => sides(outline));
+  return [...faces, ...runs, ...pits].flatMap((walls) => squareTo(walls, at));
 }
 
 /** The walls that a machine stands square to, which are those that mirror it; where there is none, the nearest. */
@@ -85,11 +95,6 @@ function squareTo(walls: readonly Wall[], at: Place): readonly Wall[] {
   if (square.length > 0) return square;
   const nearest = Math.min(...walls.map(([a, b]) => distanceToSegmentM(at, a, b)));
   return walls.filter(([a, b]) => distanceToSegmentM(at, a, b) === nearest).slice(0, 1);
-}
-
-/** Above 0 for an outline given anticlockwise, below 0 for one given clockwise. */
-function orientation(outline: readonly Place[]): number {
-  return sides(outline).reduce((sum, [a, b]) => sum + (a.xM * b.yM - b.xM * a.yM), 0);
 }
 
 function wallDistanceM([a, b]: Wall, outline: readonly Place[], at: Place, swingM: number): number {
