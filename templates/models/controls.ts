@@ -1,11 +1,13 @@
-import type { Control } from "../../compute/documents/types/statement.gen.ts";
+import type { Control, ScreenControl } from "../../compute/documents/types/statement.gen.ts";
 import { decimals, tenthDb } from "../../compute/figures/display.ts";
 import { lineLengthM } from "../../compute/geometry/place.ts";
+import { totalM2 } from "../../compute/geometry/surface.ts";
 import { effectOf } from "../../compute/statement/control-sets.ts";
 import { metricOf } from "../../compute/statement/limit-rules.ts";
 import { dateText, listText } from "./dates.ts";
 import type { RevisionView } from "./revision-view.ts";
 import { pointName, ruleOf } from "./revision-view.ts";
+import type { Words } from "./words.ts";
 
 /** Every control of a statement: what it is, its state, who sees to it, what it is worth where and when. */
 export function controlsPart(view: RevisionView) {
@@ -34,6 +36,19 @@ function controlText(view: RevisionView, control: Control): string {
         height: decimals(control.heightM, 1),
         length: decimals(lineLengthM(control.line), 0),
         panel: sheetName(view.revision.inputs.panels, control.panel),
+        deduction: decimals(control.siteBuildDeductionDb, 0),
+        gaps: gapsText(words, control),
+        facing:
+          control.facing.kind === "reflective"
+            ? words.say("statement.facing-reflective")
+            : words.say("statement.facing-absorptive", {
+                sheet: sheetName(view.revision.inputs.linings, control.facing.sheet),
+              }),
+      });
+    case "bund":
+      return words.say("statement.bund-what", {
+        height: decimals(control.heightM, 1),
+        length: decimals(lineLengthM(control.line), 0),
       });
     case "enclosure":
       return words.say(control.namedClosedOnNotice ? "statement.enclosure-named" : "statement.enclosure-what", {
@@ -47,6 +62,11 @@ function controlText(view: RevisionView, control: Control): string {
     case "practice":
       return text(control.measure);
   }
+}
+
+function gapsText(words: Words, screen: ScreenControl): string {
+  if (screen.gaps.length === 0) return words.say("statement.screen-no-gaps");
+  return words.say("statement.screen-gaps", { area: decimals(totalM2(screen.gaps), 1) });
 }
 
 function stateText(view: RevisionView, control: Control): string {

@@ -14,8 +14,9 @@ import { equationPart } from "./equation-part.ts";
 import type { Typesetter } from "./math.ts";
 import type { Page } from "./page.ts";
 import { headOf, hrefTo } from "./page.ts";
+import { pathName } from "./path-name.ts";
 import type { RevisionView } from "./revision-view.ts";
-import { controlOf, itemOf, pointName, ruleOf } from "./revision-view.ts";
+import { itemOf, pointName, ruleOf } from "./revision-view.ts";
 import { levelsAt } from "./statement.ts";
 import { termTable } from "./term-table.ts";
 import { banner, titleBlock } from "./title-block.ts";
@@ -72,12 +73,14 @@ function methodLines(view: RevisionView): readonly string[] {
       humidity: decimals(method.humidityPct, 0),
       pressure: decimals(method.pressureKpa, 3),
     }),
-    words.say("workings.ground", {
+    words.say(`workings.ground-method-${method.ground}`, {
       elsewhere: `${text(ground.elsewhere.description)} G = ${decimals(ground.elsewhere.groundFactor, 2)}`,
       areas: ground.areas.map((area) => `${text(area.description)} G = ${decimals(area.groundFactor, 2)}`).join("; "),
     }),
     words.say(`workings.screen-${method.screenOverHardGround}`),
     words.say("workings.one-screen"),
+    words.say(`workings.reflections-${method.reflections}`),
+    words.say("workings.met", { c0: decimals(method.c0Db, 1) }),
     words.say("workings.bands"),
   ];
 }
@@ -135,24 +138,20 @@ function sumPart(view: RevisionView, period: SealedPeriod) {
 
 function governingPart(view: RevisionView, decides: SealedGoverning, typesetter: Typesetter) {
   const { words, text } = view;
-  const screen = decides.steps.length > 0 ? screenOf(view, decides) : "";
-  return {
-    kind: "steps",
-    lead: words.say(`workings.governing-${decides.path}`, {
-      item: text(itemOf(view, decides.item).name),
-      band: decides.bandHz,
-      screen,
-    }),
-    steps: decides.steps.map((step) => stepPart(view, step, typesetter)),
-  };
-}
-
-function screenOf(view: RevisionView, decides: SealedGoverning): string {
   const terms = view.revision.terms.find(
     (each) => each.activity === decides.activity && each.item === decides.item && each.point === decides.point,
   );
-  const screen = terms?.paths.find(({ path }) => path === decides.path)?.screen;
-  return screen ? view.text(controlOf(view, screen).name) : "";
+  const path = terms?.paths[decides.path];
+  if (!path) throw new Error(`${decides.point}: the governing path is not in its term table`);
+  return {
+    kind: "steps",
+    lead: words.say("workings.governing", {
+      item: text(itemOf(view, decides.item).name),
+      band: decides.bandHz,
+      path: pathName(view, path),
+    }),
+    steps: decides.steps.map((step) => stepPart(view, step, typesetter)),
+  };
 }
 
 function stepPart(view: RevisionView, step: SealedStep, typesetter: Typesetter) {
