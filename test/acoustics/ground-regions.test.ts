@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { groundFactors } from "../../compute/acoustics/ground-regions.ts";
-import type { Ground, Point } from "../../compute/acoustics/site.ts";
+import type { Ground } from "../../compute/acoustics/site.ts";
 import { silently } from "../../compute/equations/working.ts";
 
 // [derived] ISO 9613-2:1996, 7.3.1: source region 30·hs from the source, receptor region 30·hr from the receptor point, the rest
@@ -14,13 +14,13 @@ const strip = (fromM: number, toM: number, groundFactor: number) => ({
   ],
   groundFactor,
 });
-const point = (xM: number, heightM: number): Point => ({ at: { xM, yM: 0 }, groundM: 0, heightM });
 const factors = (areas: Ground["areas"], lengthM: number, sourceM = 1, receptorM = 1, elsewhere = 0) => {
   const { source, middle, receptor } = groundFactors(
     silently,
     { elsewhere, areas },
-    point(0, sourceM),
-    point(lengthM, receptorM),
+    { lengthM, legs: [{ fromShare: 0, toShare: 1, from: { xM: 0, yM: 0 }, to: { xM: lengthM, yM: 0 } }] },
+    sourceM,
+    receptorM,
   );
   return [source, middle, receptor].map((factor) => Number(factor.toFixed(12)));
 };

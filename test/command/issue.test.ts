@@ -29,7 +29,7 @@ describe("issue", () => {
       err: `${PHASE}: expected a draft that differs from revision 1, received the same documents. Nothing was issued.\n`,
     });
 
-    change(STATEMENT, '"title": { "en": "Casting the wall" }', '"title": { "en": "Casting the new wall" }');
+    change(STATEMENT, '"en": "Casting the wall"', '"en": "Casting the new wall"');
     expect(await issue("2026-11-30")).toEqual({
       code: 1,
       out: "",

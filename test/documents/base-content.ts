@@ -84,6 +84,8 @@ const project: Project = {
     temperatureC: 10,
     humidityPct: 70,
     pressureKpa: 101.325,
+    reflections: "first-order",
+    c0Db: 0,
   },
   boundary: [
     { xM: 0, yM: 0 },
@@ -113,6 +115,7 @@ const project: Project = {
         { xM: 0, yM: -50 },
       ],
       heightM: 8,
+      walls: "with-windows",
     },
     {
       id: "shed",
@@ -124,7 +127,22 @@ const project: Project = {
         { xM: 60, yM: 50 },
       ],
       heightM: 5,
+      walls: "flat",
       standsUntil: { kind: "phase", phase: "piling" },
+    },
+  ],
+  excavations: [
+    {
+      id: "pump-pit",
+      name: en("Pump pit"),
+      outline: [
+        { xM: 46, yM: 26 },
+        { xM: 54, yM: 26 },
+        { xM: 54, yM: 34 },
+        { xM: 46, yM: 34 },
+      ],
+      rimM: 2,
+      standsFrom: { kind: "phase", phase: "piling" },
     },
   ],
   ground: {
@@ -254,6 +272,9 @@ const statement: Statement = {
       heightM: 3,
       panel: "ply",
       standsFrom: { kind: "date", date: "2027-03-01" },
+      siteBuildDeductionDb: 5,
+      gaps: [{ id: "under-the-panels", areaM2: 0.4 }],
+      facing: { kind: "absorptive", sheet: "wool" },
     },
     {
       id: "pump-house",
@@ -284,6 +305,18 @@ const statement: Statement = {
       ...control,
       appliesTo: ["rig-1"],
       insteadOfPct: 80,
+    },
+    {
+      id: "east-bund",
+      kind: "bund",
+      name: en("East bund"),
+      ...control,
+      line: [
+        { xM: 75, yM: 10 },
+        { xM: 75, yM: 35 },
+      ],
+      heightM: 2,
+      standsFrom: { kind: "date", date: "2027-03-01" },
     },
     { id: "radio", kind: "practice", name: en("Radios"), ...control, measure: en("Signals by radio, no horns") },
   ],

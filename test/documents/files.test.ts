@@ -88,7 +88,12 @@ describe("files that do not belong", () => {
 
 /** The project without a reference to its phase. */
 function quietProject(): string {
-  return editedTexts([[PROJECT, "/buildings/1/standsUntil"]])[PROJECT] ?? "";
+  return (
+    editedTexts([
+      [PROJECT, "/buildings/1/standsUntil"],
+      [PROJECT, "/excavations/0/standsFrom"],
+    ])[PROJECT] ?? ""
+  );
 }
 
 describe("files that cannot be read", () => {

@@ -160,7 +160,7 @@ describe("running times", () => {
       "a running time that the control would lengthen",
       [[STATEMENT, "/controls/3/insteadOfPct", 30]],
       STATEMENT,
-      '30\n    },\n    {\n      "id": "radio"',
+      '30\n    },\n    {\n      "id": "east-bund"',
       '/controls/3/insteadOfPct: expected more than the 40 % that "rig-1" runs with this control, received 30 %. Enter the on-time there would be without this control.',
     ],
     [

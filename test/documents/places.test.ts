@@ -13,10 +13,27 @@ describe("lines and outlines", () => {
   each([
     [
       "a screen of no length",
-      [[STATEMENT, "/controls/0/line", [at(10, 5), at(10.05, 5)]]],
+      [
+        [STATEMENT, "/controls/0/line", [at(10, 5), at(10.05, 5)]],
+        [STATEMENT, "/controls/0/gaps", []],
+      ],
       STATEMENT,
       '{\n          "xM": 10.05',
       "/controls/0/line/1: expected a point at least 0.1 m from the one it is joined to, received 0.050 m. Take one of the two points away, or move it.",
+    ],
+    [
+      "a bund of no length",
+      [[STATEMENT, "/controls/4/line", [at(75, 10), at(75, 10.05)]]],
+      STATEMENT,
+      '{\n          "xM": 75,\n          "yM": 10.05',
+      "/controls/4/line/1: expected a point at least 0.1 m from the one it is joined to, received 0.050 m. Take one of the two points away, or move it.",
+    ],
+    [
+      "an excavation like an hourglass",
+      [[PROJECT, "/excavations/0/outline", [at(46, 26), at(54, 34), at(54, 26), at(46, 34)]]],
+      PROJECT,
+      '[\n        {\n          "xM": 46,',
+      "/excavations/0/outline: expected an outline that does not cross itself, received edges 0 and 2 that cross or touch (edge 0 leaves corner 0). Put the corners in order around the outline.",
     ],
     [
       "a corner of the boundary twice, first and last",
@@ -59,6 +76,13 @@ describe("places of plant and receptors", () => {
       '/activities/0/plant/1/at: expected a place more than 0.1 m from every screen, received 0.060 m from "south-screen". Move the machine or the screen.',
     ],
     [
+      "plant on a bund",
+      [[STATEMENT, "/activities/0/plant/1/at", at(75.05, 30)]],
+      STATEMENT,
+      '{\n            "xM": 75.05,',
+      '/activities/0/plant/1/at: expected a place more than 0.1 m from every bund, received 0.050 m from "east-bund". Move the machine or the bund.',
+    ],
+    [
       "a receptor point inside a building",
       [[PROJECT, "/receptors/0/points/0/at", at(20, -51)]],
       PROJECT,
@@ -71,6 +95,13 @@ describe("places of plant and receptors", () => {
       STATEMENT,
       '[\n        {\n          "xM": 10,',
       '/controls/0/line: expected a line more than 0.1 m from every receptor point, received 0.000 m from "terrace-first-floor". Move the screen or the receptor point.',
+    ],
+    [
+      "a receptor point on a bund",
+      [[STATEMENT, "/controls/4/line", [at(15, -49), at(50, -49)]]],
+      STATEMENT,
+      '[\n        {\n          "xM": 15,',
+      '/controls/4/line: expected a line more than 0.1 m from every receptor point, received 0.000 m from "terrace-first-floor". Move the bund or the receptor point.',
     ],
   ]);
 
@@ -97,6 +128,14 @@ describe("screens and enclosures", () => {
       STATEMENT,
       '"ply",\n      "standsFrom"',
       '/controls/0/panel: expected a closed panel of at least 10 kg/m² (ISO 9613-2:1996, 7.4), received "ply", which is not closed. It may not count as a screen: choose another panel.',
+    ],
+    [
+      // [derived] 40 m of 3 m: 120 m²
+      "a screen that is all gap",
+      [[STATEMENT, "/controls/0/gaps/0/areaM2", 120]],
+      STATEMENT,
+      '[\n        {\n          "id": "under-the-panels"',
+      "/controls/0/gaps: expected gaps of less than the 120.0 m² of the face, received 120.0 m² of gaps. Enter the area of the openings under and between the panels.",
     ],
     [
       // [derived] 1.25 / (20 + 1.25) = 5.88 %

@@ -61,6 +61,13 @@ describe("names and ids", () => {
       '/controls/3/id: expected an id that nothing else in this document has, received "rig-1", which /activities/0/plant/0 has too. Give one of the two another id.',
     ],
     [
+      "a control with the id of an excavation",
+      [[STATEMENT, "/controls/4/id", "pump-pit"]],
+      STATEMENT,
+      '"pump-pit"',
+      '/controls/4/id: expected an id that no building or excavation of the project has, received "pump-pit". Give the control another id.',
+    ],
+    [
       "a period of one id with two shapes",
       [[CONSENT, "/rules/1/period/from", "08:00"]],
       CONSENT,
@@ -92,6 +99,13 @@ describe("references", () => {
       STATEMENT,
       '"plyy"',
       '/controls/0/panel: expected the id of a panel sheet, received "plyy". Did you mean "ply"?',
+    ],
+    [
+      "a lining that faces a screen",
+      [[STATEMENT, "/controls/0/facing/sheet", "wol"]],
+      STATEMENT,
+      '"wol"',
+      '/controls/0/facing/sheet: expected the id of a lining sheet, received "wol". Did you mean "wool"?',
     ],
     [
       "a panel of an enclosure",
@@ -165,6 +179,20 @@ describe("references", () => {
       PROJECT,
       '"pilling"',
       '/buildings/1/standsUntil/phase: expected the id of a phase of this project, received "pilling". Did you mean "piling"?',
+    ],
+    [
+      "a phase from which an excavation is there",
+      [[PROJECT, "/excavations/0/standsFrom/phase", "pilling"]],
+      PROJECT,
+      '"pilling"',
+      '/excavations/0/standsFrom/phase: expected the id of a phase of this project, received "pilling". Did you mean "piling"?',
+    ],
+    [
+      "a phase from which a bund stands",
+      [[STATEMENT, "/controls/4/standsFrom", { kind: "phase", phase: "pilling" }]],
+      STATEMENT,
+      '"pilling"',
+      '/controls/4/standsFrom/phase: expected the id of a phase of this project, received "pilling". Did you mean "piling"?',
     ],
     [
       "a phase from which a screen stands",
@@ -314,8 +342,22 @@ describe("dates and times", () => {
       "a building taken down, by phase, before it is put up",
       [[PROJECT, "/buildings/1/standsFrom", { kind: "date", date: "2027-05-01" }]],
       PROJECT,
-      '{\n        "kind": "phase"',
+      '{\n        "kind": "phase",\n        "phase": "piling"\n      },\n      "standsFrom"',
       "/buildings/1/standsUntil: expected a day from 2027-05-01 on, received 2027-04-30. Nothing can be taken down before it is put up.",
+    ],
+    [
+      "an excavation filled before it is dug",
+      [[PROJECT, "/excavations/0/standsUntil", { kind: "date", date: "2027-02-01" }]],
+      PROJECT,
+      '{\n        "kind": "date",\n        "date": "2027-02-01"',
+      "/excavations/0/standsUntil: expected a day from 2027-03-01 on, received 2027-02-01. Nothing can be taken down before it is put up.",
+    ],
+    [
+      "a bund taken away before it is heaped up",
+      [[STATEMENT, "/controls/4/standsUntil", { kind: "date", date: "2027-02-01" }]],
+      STATEMENT,
+      '{\n        "kind": "date",\n        "date": "2027-02-01"',
+      "/controls/4/standsUntil: expected a day from 2027-03-01 on, received 2027-02-01. Nothing can be taken down before it is put up.",
     ],
     [
       "a window without length",

@@ -10,7 +10,7 @@ const CASES: readonly Case[] = [
     [[PROJECT, "/nickname", "Quay"]],
     PROJECT,
     '"nickname"',
-    '/nickname: expected a field of this object, received "nickname". Fields here: "id", "invented", "title", "town", "client", "contractor", "languages", "timeZone", "publicUrl", "groundLevelM", "hours", "method", "boundary", "publicWays", "buildings", "ground", "receptors", "limitSets", "dutySet", "contacts", "confirmed" and "acknowledged".',
+    '/nickname: expected a field of this object, received "nickname". Fields here: "id", "invented", "title", "town", "client", "contractor", "languages", "timeZone", "publicUrl", "groundLevelM", "hours", "method", "boundary", "publicWays", "buildings", "excavations", "ground", "receptors", "limitSets", "dutySet", "contacts", "confirmed" and "acknowledged".',
   ],
   [
     "a mistyped field is one mistake, although the right one is missing",
@@ -118,7 +118,7 @@ const CASES: readonly Case[] = [
     [[STATEMENT, "/controls/0/kind", "scren"]],
     STATEMENT,
     '"scren"',
-    '/controls/0/kind: expected "screen", "enclosure", "quieter-plant", "running-time" or "practice", received "scren". Did you mean "screen"?',
+    '/controls/0/kind: expected "screen", "bund", "enclosure", "quieter-plant", "running-time" or "practice", received "scren". Did you mean "screen"?',
   ],
   [
     "a kind that is like none",

@@ -4,10 +4,20 @@ import { validator } from "../../compute/documents/validator.ts";
 import { CSV_COLUMNS, figuresCsv } from "../../compute/figures/figures-csv.ts";
 import { figuresFile } from "../../compute/figures/figures-file.ts";
 import { demoRevisions } from "../helpers/demo-revisions.ts";
+import { otherMethodRevision } from "../helpers/other-method.ts";
 
 type Row = Readonly<Record<(typeof CSV_COLUMNS)[number], string>>;
 
-describe.each(demoRevisions().map((revision) => [revision.phase, revision] as const))("files of %s", (_, revision) => {
+const revisions = [...demoRevisions(), otherMethodRevision()];
+
+test("the files that are read have reflected paths, a solid-angle index and a meteorological correction among them", () => {
+  const terms = revisions.flatMap((revision) => revision.terms);
+  expect(terms.some(({ paths }) => paths.some(({ kind }) => kind === "reflected"))).toBe(true);
+  expect(terms.some(({ directivityDb }) => directivityDb > 0)).toBe(true);
+  expect(terms.some(({ metDb }) => metDb > 0)).toBe(true);
+});
+
+describe.each(revisions.map((revision) => [revision.phase, revision] as const))("files of %s", (_, revision) => {
   const rows = parse(figuresCsv(revision), { columns: true }) as readonly Row[];
   const figures = rows.filter(({ row }) => row === "figure");
   const terms = rows.filter(({ row }) => row === "term");
@@ -27,7 +37,9 @@ describe.each(demoRevisions().map((revision) => [revision.phase, revision] as co
     for (const key of levels) {
       const own = terms.filter(({ figure }) => figure === key);
       const energy = own.reduce(
-        (sum, row) => sum + Number(row.share) * 10 ** ((Number(row.path_level_db) + Number(row.a_weight_db)) / 10),
+        (sum, row) =>
+          sum +
+          Number(row.share) * 10 ** ((Number(row.path_level_db) + Number(row.a_weight_db) - Number(row.met_db)) / 10),
         0,
       );
       const value = 10 * Math.log10(energy) + Number(own[0]?.facade_db);
@@ -41,13 +53,25 @@ describe.each(demoRevisions().map((revision) => [revision.phase, revision] as co
       const left =
         db("sound_power_db") -
         db("control_loss_db") -
+        db("reflection_db") +
+        db("directivity_db") -
         db("divergence_db") -
         db("air_db") -
         db("ground_db") -
         db("screen_db") -
         db("cap_db");
-      // Eight numbers rounded to a thousandth: at most eight half-thousandths apart.
-      expect(Math.abs(left - db("path_level_db")), JSON.stringify(row)).toBeLessThanOrEqual(0.004);
+      // Ten numbers rounded to a thousandth: at most ten half-thousandths apart.
+      expect(Math.abs(left - db("path_level_db")), JSON.stringify(row)).toBeLessThanOrEqual(0.005 + 1e-9);
+    }
+  });
+  test("paths are numbered in each source's table and say what they are and what they pass", () => {
+    const kinds = ["direct", "over", "left", "right", "left-then-over", "right-then-over", "through", "reflected"];
+    for (const row of terms) {
+      const [number = "", kind = ""] = row.path.split(" ");
+      expect(Number(number)).toBeGreaterThan(0);
+      expect(kinds).toContain(kind);
+      expect(row.past === "", JSON.stringify(row)).toBe(kind === "direct");
+      expect(Number(row.distance_m)).toBeGreaterThan(0);
     }
   });
   test("whole-period shares are on-time and hours", () => {

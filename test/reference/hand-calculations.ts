@@ -143,6 +143,43 @@ const derived: readonly Omit<HandCalculation, "mark">[] = [
     printed: "1.0000",
   },
   {
+    equation: "least-reflector",
+    how: "500 Hz, 20 m there and 20 m back, square on: √(2 × 0.68 × 20 × 20 / 40) = √13.6",
+    computed: () => equations["least-reflector"].of({ bandHz: 500, toSurfaceM: 20, fromSurfaceM: 20, incidenceRad: 0 }),
+    printed: "3.6878",
+  },
+  {
+    equation: "least-reflector",
+    how: "1 kHz, 10 m there and 40 m on, at 60°: √(2 × 0.34 × 400 / 50) / 0.5 = √5.44 / 0.5",
+    computed: () =>
+      equations["least-reflector"].of({ bandHz: 1000, toSurfaceM: 10, fromSurfaceM: 40, incidenceRad: Math.PI / 3 }),
+    printed: "4.6648",
+  },
+  {
+    equation: "reflected-power",
+    how: "walls with windows: 100 + 10 lg 0.8 = 100 − 0.9691",
+    computed: () => equations["reflected-power"].of({ powerDb: 100, reflection: 0.8 }),
+    printed: "99.0309",
+  },
+  {
+    equation: "reflected-power",
+    how: "walls half open: 100 + 10 lg 0.4 = 100 − 3.9794",
+    computed: () => equations["reflected-power"].of({ powerDb: 100, reflection: 0.4 }),
+    printed: "96.0206",
+  },
+  {
+    equation: "met-level",
+    how: "C0 = 2 dB, hs + hr = 3 m, 100 m off: 60 − 2 × (1 − 30/100)",
+    computed: () => equations["met-level"].of({ levelDb: 60, metDb: 1.4 }),
+    printed: "58.6000",
+  },
+  {
+    equation: "composite-index",
+    how: "20 dB with 1 % of gaps: −10 lg(0.99 × 0.01 + 0.01) = −10 lg 0.0199",
+    computed: () => equations["composite-index"].of({ areasM2: [99, 1], reductionIndexesDb: [20, 0] }),
+    printed: "17.0115",
+  },
+  {
     equation: "unscreened-limit",
     how: "two paths of 50 dB make 53.0103, over an open level of 51: 50 − 2.0103",
     computed: () => equations["unscreened-limit"].of({ levelDb: 50, pathLevelsDb: [50, 50], unscreenedDb: 51 }),

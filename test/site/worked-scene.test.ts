@@ -6,6 +6,7 @@ import { runCommand } from "../helpers/site-command.ts";
 import { printedNumber } from "../helpers/site-numbers.ts";
 import type { PageElement, ParsedPage } from "../helpers/site-page.ts";
 import { parsePage, textOf } from "../helpers/site-page.ts";
+import type { HandScene } from "../reference/hand-work.ts";
 
 // [derived] Worked out by hand in test/reference/worked-scene/worked-scene.md; nothing in expected.json comes from the program.
 // Here the numbers are read from the pages, as a reader would, after the scene was issued and built.
@@ -13,29 +14,6 @@ const SCENE = "test/reference/worked-scene";
 const PHASE = "tide-mill/sluice";
 const BANDS = ["63", "125", "250", "500", "1000", "2000", "4000", "8000"];
 
-interface HandTerms {
-  readonly activity: string;
-  readonly item: string;
-  readonly point: string;
-  readonly powerDb: readonly number[];
-  readonly controlLossDb: readonly number[];
-  readonly divergenceDb: number;
-  readonly airDb: readonly number[];
-  readonly groundDb: readonly number[];
-  readonly paths: readonly {
-    readonly path: "direct" | "over" | "left" | "right";
-    readonly screenDb: readonly number[];
-    readonly capDb: readonly number[];
-    readonly levelDb: readonly number[];
-  }[];
-  readonly levelDba: number;
-}
-interface Hand {
-  readonly figures: readonly { readonly key: string; readonly value: number; readonly unit: string }[];
-  readonly terms: readonly HandTerms[];
-  readonly shares: readonly { rule: string; activity: string; item: string; share: number }[];
-  readonly zones: readonly { readonly item: string; readonly printedM: number }[];
-}
 interface Names {
   readonly activities: readonly {
     readonly id: string;
@@ -45,7 +23,7 @@ interface Names {
 }
 
 const read = <T>(file: string) => JSON.parse(readFileSync(path.join(SCENE, file), "utf8")) as T;
-const hand = read<Hand>("expected.json");
+const hand = read<HandScene>("expected.json");
 const names = read<Names>("content/projects/tide-mill/sluice/statement.json");
 const activityName = (id: string) => names.activities.find((each) => each.id === id)?.title.en ?? id;
 const itemName = (id: string) =>
@@ -171,7 +149,16 @@ describe("zones of the scene worked by hand, read from the pages", () => {
 });
 
 describe("term tables of the scene worked by hand, read from the workings", () => {
-  const PATHS = { direct: /straight$/, over: /over the /, left: /round the left end/, right: /round the right end/ };
+  const PATHS = {
+    direct: /straight$/,
+    over: /over Screen /,
+    left: /round the left side of Screen /,
+    right: /round the right side of Screen /,
+    "left-then-over": /round the left side of .*, then over /,
+    "right-then-over": /round the right side of .*, then over /,
+    through: /through Screen /,
+    reflected: /reflected by /,
+  };
 
   test.each(hand.terms)("$item at $point", (terms) => {
     const section = workings.withId(terms.point).parent as PageElement;
@@ -199,12 +186,11 @@ describe("term tables of the scene worked by hand, read from the workings", () =
     );
     row(/^− air/, terms.airDb);
     row(/^− ground/, terms.groundDb);
-    for (const { path: way, screenDb, capDb, levelDb } of terms.paths) {
-      const of = (start: string) => new RegExp(`^${start}.*${PATHS[way].source}`);
-      if (way !== "direct") {
-        row(of("− screen"), screenDb);
-        row(of("− kept to the unscreened level"), capDb);
-      }
+    for (const { kind, screenDb, capDb, levelDb } of terms.paths) {
+      const of = (start: string) => new RegExp(`^${start}.*${PATHS[kind].source}`);
+      if (kind !== "direct") row(of("− screen"), screenDb);
+      // Where nothing is taken off, no row says so.
+      if (capDb.some((value) => value !== 0)) row(of("− kept to the unscreened level"), capDb);
       row(of("= level"), levelDb);
     }
     const total = workings
