@@ -4,6 +4,7 @@ import { decimals, tenthDb } from "../../compute/figures/display.ts";
 import { pathName } from "./path-name.ts";
 import type { RevisionView } from "./revision-view.ts";
 import { itemOf } from "./revision-view.ts";
+import type { Words } from "./words.ts";
 
 /** A term table as a page prints it: a row per term, a column per octave band. */
 export function termTable(view: RevisionView, terms: SealedTerms) {
@@ -12,7 +13,7 @@ export function termTable(view: RevisionView, terms: SealedTerms) {
   if (!activity) throw new Error(`the statement has no activity "${terms.activity}"`);
   const row = (key: string, values: readonly number[], path = "") => ({
     label: words.say(`terms.row-${key}`, { path }),
-    cells: values.map((value) => tenthDb(value / 1000)),
+    cells: values.map((value) => cellText(words, value / 1000)),
   });
   return {
     caption: words.say("workings.table-caption", {
@@ -54,6 +55,11 @@ export function termTable(view: RevisionView, terms: SealedTerms) {
       met: tenthDb(terms.metDb / 1000),
     }),
   };
+}
+
+/** A term to a tenth; a dash in a band in which the path does not count, where terms and levels stand hundreds of decibels off. */
+function cellText(words: Words, valueDb: number): string {
+  return Math.abs(valueDb) > 150 ? words.say("terms.not-counted") : tenthDb(valueDb);
 }
 
 type Row = { readonly label: string; readonly cells: readonly string[] };
