@@ -3,6 +3,7 @@ import type { Place } from "../geometry/place.ts";
 import { highestBesideDba } from "./beside.ts";
 import type { Comparator } from "./peak.ts";
 import { peakDistanceM, peakMeets } from "./peak.ts";
+import { withWalls } from "./walls.ts";
 import { zoneReach, zoneSumDba } from "./zone-distance.ts";
 import type { WalledMachine } from "./zone-machine.ts";
 
@@ -61,7 +62,7 @@ export function zoneOf(
   edges: ZoneEdges,
 ): Zone {
   if (machine.impulsive && !machine.peak) {
-    const leastM = machine.open ? zoneReach(machine, together, edges.levelDba)?.distanceM : undefined;
+    const leastM = machine.open ? widestReach(machine, together, edges.levelDba)?.reach.distanceM : undefined;
     return { kind: "peak-not-known", machine: machine.id, leastM };
   }
   const peakM = peakReachM(working, machine, edges.peak);
@@ -69,14 +70,26 @@ export function zoneOf(
   const loud = loudBeside || (machine.workStationDba ?? 0) >= edges.levelDba;
   if (!loud && peakM === undefined) return { kind: "none", machine: machine.id };
   if (!machine.open) return { kind: "whole-space", machine: machine.id };
-  const reach = loud ? zoneReach(machine, together, edges.levelDba) : undefined;
-  if (reach && reach.distanceM >= (peakM ?? 0)) {
-    zoneSumDba(working.at("place:edge"), together, reach.at);
-    return distanceZone(machine, reach.distanceM, reach.at, "level");
+  const widest = loud ? widestReach(machine, together, edges.levelDba) : undefined;
+  if (widest && widest.reach.distanceM >= (peakM ?? 0)) {
+    zoneSumDba(working.at("place:edge"), widest.running, widest.reach.at);
+    return distanceZone(machine, widest.reach.distanceM, widest.reach.at, "level");
   }
   if (peakM !== undefined) return distanceZone(machine, peakM, machine.at, "peak");
   // Only the work station is loud: the least distance that the rule knows.
   return loudBeside ? { kind: "inside-another", machine: machine.id } : distanceZone(machine, 1, machine.at, "level");
+}
+
+/**
+ * The farther of two reaches: in the sum of all, up to where the machine leads, and by itself, since the others stop and their
+ * marks come down while it goes on.
+ */
+function widestReach(machine: WalledMachine, together: readonly WalledMachine[], edgeDba: number) {
+  const inSum = zoneReach(machine, together, edgeDba);
+  const alone = withWalls([machine], edgeDba);
+  const [own] = alone.flatMap((each) => zoneReach(each, alone, edgeDba) ?? []);
+  if (own && own.distanceM > (inSum?.distanceM ?? 0)) return { reach: own, running: alone };
+  return inSum && { reach: inSum, running: together };
 }
 
 function distanceZone(machine: WalledMachine, distanceM: number, at: Place, by: "level" | "peak"): Zone {

@@ -131,6 +131,12 @@ describe("two machines", () => {
     expect(zone(quiet(6), [machine("loud")])).toEqual({ kind: "inside-another", machine: "quiet" });
     expect(zone(quiet(60), [machine("loud")])).toEqual({ kind: "none", machine: "quiet" });
   });
+  test("one that a louder one drowns is still marked as far as it needs by itself", () => {
+    // [derived] 100 dB(A), edge 82: 10^((100 − 7.9818 − 82)/20) = 3.1694 m, though the loud one leads from its outline on.
+    const found = zone(machine("drowned", 4, { powerDba: 100 }), [machine("loud", 0, { powerDba: 120 })]);
+    if (found.kind !== "distance") throw new Error(found.kind);
+    expect(Math.abs(found.distanceM - 3.1694)).toBeLessThanOrEqual(0.0015);
+  });
   test("every place that meets the edge level lies inside the distance of one of them", () => {
     const pair = [machine("a"), machine("b", 9, { powerDba: 106 })];
     const reach = new Map(pair.map((one) => [one.id, zoneReach(one, pair, 82)?.distanceM ?? 0]));
