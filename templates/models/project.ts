@@ -5,6 +5,7 @@ import { judgedLevel } from "./levels.ts";
 import type { Page } from "./page.ts";
 import { headOf, hrefTo } from "./page.ts";
 import type { RevisionView } from "./revision-view.ts";
+import { figureOf } from "./revision-view.ts";
 import { sealSigns } from "./title-block.ts";
 import type { Words } from "./words.ts";
 
@@ -79,25 +80,20 @@ function nowText(words: Words, phases: ProjectView["phases"], asOf: string): str
     : words.say("project.over");
 }
 
-/** The loudest judged level at a receptor in one phase, over the whole of a limit's period. */
+/** The judged level at a receptor in one phase that comes closest to its limit, or lies farthest over it. */
 function receptorInPhase(view: RevisionView, file: string, receptor: string) {
-  const periods = view.revision.periods.filter(
-    ({ point, key }) => point.startsWith(`${receptor}.`) && key.startsWith("level/LAeq/"),
-  );
+  const periods = view.revision.periods.filter(({ point }) => point.startsWith(`${receptor}.`));
   const [first] = periods;
   const title = view.text(view.statement.title);
-  if (!first)
-    return {
-      phase: title,
-      text: view.words.say("project.receptor-none"),
-      href: hrefTo(file, `${view.folder}index.html`),
-    };
-  const loudest = periods.reduce((kept, next) => (kept.levelDba >= next.levelDba ? kept : next), first);
-  const { about, limit, standing, period } = judgedLevel(view, loudest);
+  const href = (anchor: string) => hrefTo(file, `${view.folder}index.html${anchor}`);
+  if (!first) return { phase: title, text: view.words.say("project.receptor-none"), href: href("") };
+  const margin = (key: string) => figureOf(view, key.replace(/^level\//, "exceedance/")).value;
+  const decides = periods.reduce((kept, next) => (margin(kept.key) >= margin(next.key) ? kept : next), first);
+  const { about, limit, standing, period, averaging } = judgedLevel(view, decides);
   return {
     phase: title,
-    text: view.words.say("project.receptor-level", { about, limit, standing, period }),
-    href: hrefTo(file, `${view.folder}index.html#${receptor}`),
+    text: view.words.say("project.receptor-level", { about, limit, standing, period, averaging }),
+    href: href(`#${receptor}`),
   };
 }
 
