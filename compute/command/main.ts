@@ -32,6 +32,10 @@ async function outcome(command: Command, args: readonly string[], place: Place):
 }
 
 function print({ code, out, err }: Outcome): number {
+  // A reader such as `head` may close the pipe before all is written; that is no fault.
+  process.stdout.on("error", (error: NodeJS.ErrnoException) => {
+    if (error.code !== "EPIPE") throw error;
+  });
   process.stdout.write(out);
   process.stderr.write(err);
   return code;
